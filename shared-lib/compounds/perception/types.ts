@@ -33,6 +33,8 @@ export interface CarbonylSite {
   readonly sigmaStar: number;
   /** Number of acyl groups (C=O directly attached). */
   readonly acyl: number;
+  /** An acyl group on it is a carboxylate as written. */
+  readonly carboxylate?: boolean;
   /** Of an aryl on the carbonyl: Σσ⁺ of its substituents by position, and which stand ortho. */
   readonly aryl?: {
     readonly sigmaPlus: number;
@@ -44,7 +46,7 @@ export interface CarbonylSite {
   /** Σσ* rests on a group the table lacks (estimated by attenuation from its parts). */
   readonly extrapolated: boolean;
   /** Ring that an OH of the molecule can close on this carbon (5, 6, 7 members), with the SMILES of that hemiacetal. */
-  readonly closure?: { readonly ringSize: number; readonly smiles: string };
+  readonly closure?: { readonly ringSize: 5 | 6 | 7; readonly smiles: string };
   /** SMILES of the gem-diol at this site. */
   readonly hydrateSmiles: string;
 }

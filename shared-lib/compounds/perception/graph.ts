@@ -1,0 +1,41 @@
+/** A molecule as perception needs it: atoms in the order of the SMILES, heavy atoms only, aromatic bonds kekulised. */
+
+export interface GraphAtom {
+  readonly element: string;
+  readonly charge: number;
+  /** All H, explicit or not. */
+  readonly hydrogens: number;
+  readonly aromatic: boolean;
+  readonly neighbours: readonly { readonly atom: number; readonly order: number; readonly inRing: boolean }[];
+}
+
+export interface MoleculeGraph {
+  readonly atoms: readonly GraphAtom[];
+  /** Smallest set of smallest rings, atoms in ring order. */
+  readonly rings: readonly { readonly atoms: readonly number[]; readonly aromatic: boolean }[];
+}
+
+/** Atom of the graph; the index always comes from the graph itself. */
+export function atomAt(graph: MoleculeGraph, index: number): GraphAtom {
+  const atom = graph.atoms[index];
+  if (!atom) throw new RangeError(`atom ${index} is not in the molecule`);
+  return atom;
+}
+
+/** Neighbours of `index` other than `from`. */
+export function othersOf(graph: MoleculeGraph, index: number, from: number): GraphAtom["neighbours"] {
+  return atomAt(graph, index).neighbours.filter((bond) => bond.atom !== from);
+}
+
+/** Has a double bond to O (or to S, when `withSulfur`). */
+export function hasOxo(graph: MoleculeGraph, index: number): boolean {
+  return atomAt(graph, index).neighbours.some((bond) => bond.order === 2 && atomAt(graph, bond.atom).element === "O");
+}
+
+/** Smallest ring that holds `index`, or undefined. */
+export function smallestRing(graph: MoleculeGraph, index: number): MoleculeGraph["rings"][number] | undefined {
+  let best: MoleculeGraph["rings"][number] | undefined;
+  for (const ring of graph.rings)
+    if (ring.atoms.includes(index) && (!best || ring.atoms.length < best.atoms.length)) best = ring;
+  return best;
+}

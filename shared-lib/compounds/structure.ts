@@ -1,0 +1,162 @@
+/**
+ * The structure toolkit: openchemlib behind the port of `types.ts`. The only file that imports it; load it with a dynamic import.
+ * Always parsed without coordinates: those cost a few hundred milliseconds at the first molecule.
+ */
+
+import { Molecule } from "openchemlib";
+import type { GraphAtom, MoleculeGraph } from "./perception/graph.ts";
+import { type PerceivedSite, perceive } from "./perception/perceive.ts";
+import type { CarbonylSite } from "./perception/types.ts";
+import { scanSmiles } from "./smiles-syntax.ts";
+import type { StructureReading, StructureToolkit } from "./types.ts";
+
+const MOST_HEAVY_ATOMS = 300;
+
+/** Elements that a reagent with a carbonyl may hold as its salt; other metals make a complex that the model does not know. */
+const SALT_METALS = new Set(["Li", "Na", "K", "Cs", "Mg", "Ca", "Ba", "Zn", "Al", "Ag"]);
+const NON_METALS = new Set("H B C N O F Si P S Cl Ge As Se Br Te I".split(" "));
+
+/** The molecule as perception sees it. */
+export function graphOf(molecule: Molecule): MoleculeGraph {
+  const atoms: GraphAtom[] = [];
+  for (let i = 0; i < molecule.getAtoms(); i++) {
+    const neighbours: { atom: number; order: number; inRing: boolean }[] = [];
+    for (let k = 0; k < molecule.getConnAtoms(i); k++) {
+      const bond = molecule.getConnBond(i, k);
+      neighbours.push({
+        atom: molecule.getConnAtom(i, k),
+        order: molecule.getConnBondOrder(i, k),
+        inRing: molecule.isRingBond(bond),
+      });
+    }
+    atoms.push({
+      element: molecule.getAtomLabel(i),
+      charge: molecule.getAtomCharge(i),
+      hydrogens: molecule.getAllHydrogens(i),
+      aromatic: molecule.isAromaticAtom(i),
+      neighbours,
+    });
+  }
+  const set = molecule.getRingSet();
+  const rings = Array.from({ length: set.getSize() }, (_, ring) => ({
+    atoms: set.getRingAtoms(ring),
+    aromatic: set.isAromatic(ring),
+  }));
+  return { atoms, rings };
+}
+
+/** A fault that the toolkit lets pass: an impossible valence, an aromatic ring that cannot be closed. */
+function chemicalFault(
+  molecule: Molecule,
+  scanned: readonly { readonly aromatic: boolean; readonly bracket: boolean; readonly at: number }[],
+): { problem: string; at?: number } | undefined {
+  for (let i = 0; i < molecule.getAllAtoms(); i++) {
+    const written = scanned[i];
+    const label = molecule.getAtomLabel(i);
+    const at = written ? { at: written.at } : {};
+    if (molecule.getFreeValence(i) < 0)
+      return {
+        problem: `${label} has ${molecule.getOccupiedValence(i)} bonds; at most ${molecule.getMaxValence(i)} fit`,
+        ...at,
+      };
+    if (written?.aromatic && molecule.getAtomRadical(i) !== 0)
+      return { problem: "the aromatic ring does not close: no alternation of bonds fits it", ...at };
+    if (molecule.getAtomRadical(i) !== 0 && NON_METALS.has(label))
+      return { problem: `${label} is a radical as written: the model knows none`, ...at };
+  }
+  return undefined;
+}
+
+function firstMessage(error: unknown): string {
+  const text = error instanceof Error ? error.message : String(error);
+  return text.replace(/^[^ ]*\$[^ ]* /, "").replace(/^SmilesParser: /, "");
+}
+
+function parse(smiles: string): { molecule: Molecule } | { problem: string; at?: number } {
+  const scan = scanSmiles(smiles);
+  if ("problem" in scan) return scan;
+  if (scan.atoms.length > MOST_HEAVY_ATOMS * 2)
+    return { problem: `more than ${MOST_HEAVY_ATOMS} heavy atoms: larger than the model is made for` };
+  try {
+    const molecule = Molecule.fromSmiles(smiles, { noCoordinates: true });
+    molecule.ensureHelperArrays(Molecule.cHelperRings);
+    if (molecule.getAtoms() > MOST_HEAVY_ATOMS)
+      return { problem: `more than ${MOST_HEAVY_ATOMS} heavy atoms: larger than the model is made for` };
+    return chemicalFault(molecule, scan.atoms) ?? { molecule };
+  } catch (error) {
+    return { problem: `the SMILES cannot be read: ${firstMessage(error)}` };
+  }
+}
+
+function complexMetal(molecule: Molecule): string | undefined {
+  for (let i = 0; i < molecule.getAllAtoms(); i++) {
+    const label = molecule.getAtomLabel(i);
+    if (!NON_METALS.has(label) && !SALT_METALS.has(label)) return label;
+  }
+  return undefined;
+}
+
+/** Structures of the gem-diol and of the ring that the site can close. */
+function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: PerceivedSite): CarbonylSite {
+  const opened = (): Molecule => {
+    const copy = molecule.getCompactCopy();
+    for (let bond = 0; bond < copy.getAllBonds(); bond++) {
+      const ends = [copy.getBondAtom(0, bond), copy.getBondAtom(1, bond)];
+      if (ends.includes(site.atom) && ends.includes(oxygen)) copy.setBondOrder(bond, 1);
+    }
+    return copy;
+  };
+  const diol = opened();
+  diol.addBond(site.atom, diol.addAtom(8));
+  const hydrateSmiles = diol.toIsomericSmiles();
+  if (!closureOxygen) return { ...site, hydrateSmiles };
+  const ring = opened();
+  ring.addBond(site.atom, closureOxygen.atom);
+  return { ...site, hydrateSmiles, closure: { ringSize: closureOxygen.ringSize, smiles: ring.toIsomericSmiles() } };
+}
+
+function read(smiles: string): StructureReading {
+  const parsed = parse(smiles);
+  if ("problem" in parsed) return { ok: false, ...parsed };
+  try {
+    const { molecule } = parsed;
+    const formula = molecule.getMolecularFormula();
+    const known = {
+      ok: true as const,
+      canonicalSmiles: molecule.toIsomericSmiles(),
+      formula: formula.formula,
+      molarMass: formula.relativeWeight,
+    };
+    const metal = complexMetal(molecule);
+    if (metal) return { ...known, outside: `it holds ${metal}: the model knows no metal complexes` };
+    const seen = perceive(graphOf(molecule));
+    if (seen.outside !== undefined) return { ...known, outside: seen.outside };
+    const sites = seen.sites.map((site) => withProducts(molecule, site));
+    return { ...known, carbonyl: { sites, ionisable: seen.ionisable } };
+  } catch (error) {
+    return { ok: false, problem: `the structure cannot be worked out: ${firstMessage(error)}` };
+  }
+}
+
+/** Drawn in the colour of the text around it, so that it reads in every theme. */
+function draw(smiles: string, width: number, height: number): string | undefined {
+  const parsed = parse(smiles);
+  if ("problem" in parsed) return undefined;
+  try {
+    const molecule = Molecule.fromSmiles(smiles);
+    const svg = molecule.toSVG(width, height, "structure", {
+      suppressChiralText: true,
+      suppressESR: true,
+      suppressCIPParity: true,
+      noStereoProblem: true,
+    });
+    return svg.replace(/rgb\(\d+,\d+,\d+\)/g, "currentColor");
+  } catch {
+    return undefined;
+  }
+}
+
+/** The toolkit; pure, its two calls never throw. */
+export function createStructureToolkit(): StructureToolkit {
+  return { read, draw };
+}
