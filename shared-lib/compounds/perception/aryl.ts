@@ -78,8 +78,7 @@ function ringName(graph: MoleculeGraph, ring: readonly number[], ipso: number): 
   });
   const forward = letters.join("");
   const backward = [letters[0], ...letters.slice(1).reverse()].join("");
-  const pattern = forward < backward ? forward : backward;
-  return HETEROARYL[pattern] ?? "heteroaryl";
+  return HETEROARYL[forward] ?? HETEROARYL[backward] ?? "heteroaryl";
 }
 
 /** Ring pattern read from the carbon that carries the carbonyl ("[n]": a pyrrole-type N). */

@@ -1,0 +1,54 @@
+/** The solvents table. */
+
+import table from "../generated/solvents.json" with { type: "json" };
+
+export interface Solvent {
+  /** Short plain name, the key everywhere else ("water", "methanol", "THF"). */
+  readonly key: string;
+  readonly name: string;
+  readonly synonyms: readonly string[];
+  readonly smiles: string;
+  readonly cas: string;
+  /** g/mol */
+  readonly molarMass: number;
+  /** g/mL at 25 °C, and its change in g/(mL K). */
+  readonly density: number;
+  readonly densitySlope: number;
+  readonly boilingC?: number;
+  readonly meltingC?: number;
+  /** What it adds to a C=O. */
+  readonly nucleophile: "water" | "alcohol" | "none";
+  readonly kind: "water" | "alcohol" | "acid" | "amine" | "ketone" | "aprotic";
+  /** Usual mass fraction of water in the bottle. */
+  readonly bottleWater: number;
+  /** Miscible with water in all proportions at 25 °C. */
+  readonly miscible: boolean;
+  readonly source: string;
+}
+
+const ROWS = table as unknown as readonly Solvent[];
+const BY_KEY = new Map(ROWS.map((row) => [row.key, row]));
+
+export function allSolvents(): readonly Solvent[] {
+  return ROWS;
+}
+
+export function solventByKey(key: string): Solvent | undefined {
+  return BY_KEY.get(key);
+}
+
+/** g/mL at a temperature; the table's line, held to within 100 K of 25 °C. */
+export function densityAt(solvent: Solvent, temperatureK: number): number {
+  const change = Math.max(-100, Math.min(100, temperatureK - 298.15));
+  return solvent.density + solvent.densitySlope * change;
+}
+
+/** L/mol at a temperature. */
+export function molarVolume(solvent: Solvent, temperatureK: number): number {
+  return solvent.molarMass / densityAt(solvent, temperatureK) / 1000;
+}
+
+/** mol in a volume (L) measured at 25 °C. */
+export function molesInVolume(solvent: Solvent, volumeL: number): number {
+  return volumeL / molarVolume(solvent, 298.15);
+}
