@@ -36,8 +36,8 @@ export interface AnalyzeOptions {
 export function analyze(text: string, options: AnalyzeOptions): Analysis {
   const settings = options.settings ?? DEFAULT_SETTINGS;
   const reading = readNote(text, options);
-  const timeline = buildTimeline(reading, settings);
+  const timeline = buildTimeline(reading, settings, options.lexicon);
   const moments = timeline.moments.map((moment) => ({ ...moment, speciation: speciate(moment.contents) }));
-  const advice = advise({ text, reading, timeline, moments, settings });
+  const advice = advise({ text, reading, timeline, moments, settings, lexicon: options.lexicon });
   return { reading, charges: timeline.charges, moments, findings: advice.findings, hints: advice.hints };
 }

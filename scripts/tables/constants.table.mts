@@ -32,8 +32,17 @@ function shortCitation(item: CslItem): string {
   return [`${who}, ${item["container-title"] ?? ""} ${year}`, item.volume, item.page].filter((part) => part).join(", ");
 }
 
+/** Ions are filed under the neutral compound, with their state: that is how the engine asks for them. */
+function neutralised(smiles: string): string {
+  const nitro = "[N+](=O)[O-]";
+  return smiles
+    .split(nitro)
+    .map((part) => part.replaceAll("[O-]", "O").replaceAll("[nH+]", "n").replaceAll("[NH2+]", "N"))
+    .join(nitro);
+}
+
 function canonicalIn(row: TableRow): string {
-  const reading = toolkit.read(row.cells.smiles ?? "");
+  const reading = toolkit.read(neutralised(row.cells.smiles ?? ""));
   if (!reading.ok) throw new Error(`${row.place}: SMILES ${row.cells.smiles}: ${reading.problem}`);
   return reading.canonicalSmiles;
 }

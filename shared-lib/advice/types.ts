@@ -1,5 +1,6 @@
 /** What the margin says: findings (would change something) and hints (short figures beside the text). */
 
+import type { Lexicon } from "../compounds/lexicon.ts";
 import type { FlaskTimeline, SpeciatedMoment } from "../flask/types.ts";
 import type { Fix, Severity } from "../model/contract.ts";
 import type { Settings } from "../model/settings.ts";
@@ -35,6 +36,8 @@ export interface AdviceInput {
   readonly timeline: FlaskTimeline;
   readonly moments: readonly SpeciatedMoment[];
   readonly settings: Settings;
+  /** For the usual supplied form and for another one to switch to. */
+  readonly lexicon?: Lexicon;
 }
 
 /** One finding: one file, one object, one line in the list. */
