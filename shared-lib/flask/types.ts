@@ -32,6 +32,8 @@ export interface FlaskMoment {
   /** Index into the reading's events. */
   readonly event: number;
   readonly step: number;
+  /** Which vessel of the step, 0 for the main flask. */
+  readonly vessel?: number;
   /** Offset of the event in the text. */
   readonly offset: number;
   readonly contents: Contents;
@@ -41,6 +43,8 @@ export interface FlaskMoment {
   readonly heldSeconds?: number;
   readonly temperatureStated: boolean;
   readonly pHStated: boolean;
+  /** False when the size of a mixture is not written and a usual one is taken. */
+  readonly volumeStated?: boolean;
 }
 
 export interface SpeciatedMoment extends FlaskMoment {

@@ -1,0 +1,23 @@
+/** The written quantities of one charge, by what they are; only those that can be used as numbers. */
+
+import type { AmountOf } from "../model/contract.ts";
+import type { Charge, Quantity } from "../notes/types.ts";
+
+export type WrittenQuantities = Readonly<Partial<Record<AmountOf | "density", Quantity>>>;
+
+/** A zero, a negative or an unreadable figure is no amount; the notes stage has told the writer so. */
+export function usable(quantity: Quantity): boolean {
+  return Number.isFinite(quantity.base) && quantity.base > 0;
+}
+
+/** First usable quantity of each kind, in the order of writing. */
+export function writtenQuantities(charge: Charge): WrittenQuantities {
+  const found: Partial<Record<AmountOf | "density", Quantity>> = {};
+  for (const quantity of charge.amounts) {
+    const { of } = quantity;
+    if (of === "temperature" || of === "time" || of === "pH" || of === "ratio") continue;
+    if (!found[of] && usable(quantity)) found[of] = quantity;
+  }
+  if (found.assay && found.assay.base > 1) delete found.assay;
+  return found;
+}

@@ -1,0 +1,148 @@
+/** One vessel while the note is followed: what is in it, how warm, how acid. */
+
+import type { Contents } from "../equilibrium/types.ts";
+import { bufferByKey, usualPH } from "../media/buffers.ts";
+import { molesInVolume, solventByKey } from "../media/solvents.ts";
+import type { MediumPart, MediumPhrase } from "../notes/types.ts";
+import { pHFromCharges } from "./ph-from-charges.ts";
+import { phraseAmounts, type SolventAmount, solventOfPart } from "./phrase-amounts.ts";
+import { countsAsSolvent } from "./resolve-charges.ts";
+import type { ResolvedCharge } from "./types.ts";
+
+/** Where a note gives no volume, its largest carbonyl is taken to be 0.2 M (common practice, no source). */
+const USUAL_MOLARITY = 0.2;
+const USUAL_VOLUME_L = 0.01;
+
+export interface Vessel {
+  readonly charges: readonly ResolvedCharge[];
+  readonly solvents: readonly SolventAmount[];
+  /** Mixtures whose size is not written. */
+  readonly unsized: readonly (readonly MediumPart[])[];
+  readonly buffer?: { readonly buffer: string; readonly molarity?: number };
+  readonly temperatureK: number;
+  readonly temperatureStated: boolean;
+  readonly pH?: number;
+  readonly pHStated: boolean;
+}
+
+export function emptyVessel(temperatureK: number): Vessel {
+  return { charges: [], solvents: [], unsized: [], temperatureK, temperatureStated: false, pHStated: false };
+}
+
+export function withCharge(vessel: Vessel, charge: ResolvedCharge): Vessel {
+  const itself =
+    countsAsSolvent(charge.compound) && charge.compound.solvent && charge.total
+      ? [{ solvent: charge.compound.solvent, amount: charge.total.value }]
+      : [];
+  return {
+    ...vessel,
+    charges: [...vessel.charges, charge],
+    solvents: [...vessel.solvents, ...charge.brings, ...itself],
+  };
+}
+
+export function withMedium(vessel: Vessel, phrase: MediumPhrase): Vessel {
+  const sized = phraseAmounts(phrase.parts, phrase.volumeL);
+  const known = phrase.parts.filter((part) => solventOfPart(part));
+  const bufferPart = phrase.parts.find((part) => part.solvent !== undefined && bufferByKey(part.solvent));
+  const buffer = bufferPart?.solvent;
+  const molarity = bufferPart?.molarity;
+  const unsized = sized.length === 0 && known.length > 0 ? [...vessel.unsized, known] : vessel.unsized;
+  const warmed = phrase.temperatureK === undefined ? vessel : withTemperature(vessel, phrase.temperatureK);
+  return {
+    ...warmed,
+    solvents: [...vessel.solvents, ...sized],
+    unsized,
+    ...(buffer ? { buffer: { buffer, ...(molarity === undefined ? {} : { molarity }) } } : {}),
+    ...(phrase.pH === undefined ? {} : { pH: phrase.pH, pHStated: true }),
+  };
+}
+
+export function withTemperature(vessel: Vessel, temperatureK: number): Vessel {
+  return { ...vessel, temperatureK, temperatureStated: true };
+}
+
+/** All solvents gone, or the water alone. */
+export function without(vessel: Vessel, what: "solvent" | "water"): Vessel {
+  if (what === "solvent") return { ...vessel, solvents: [], unsized: [] };
+  return { ...vessel, solvents: vessel.solvents.filter((row) => row.solvent !== "water") };
+}
+
+export function poured(from: Vessel, into: Vessel): Vessel {
+  const pH = into.pH ?? from.pH;
+  const buffer = into.buffer ?? from.buffer;
+  return {
+    ...into,
+    charges: [...into.charges, ...from.charges],
+    solvents: [...into.solvents, ...from.solvents],
+    unsized: [...into.unsized, ...from.unsized],
+    ...(buffer ? { buffer } : {}),
+    ...(pH === undefined ? {} : { pH }),
+    pHStated: into.pHStated || from.pHStated,
+  };
+}
+
+/** Lowest boiling point of the solvents that make up a tenth of the vessel or more, K. */
+export function refluxTemperature(vessel: Vessel): number | undefined {
+  const rows = allSolventsOf(vessel);
+  const sum = rows.reduce((all, row) => all + row.amount, 0);
+  const points = rows.flatMap((row) => {
+    const boilingC = solventByKey(row.solvent)?.boilingC;
+    return row.amount >= sum / 10 && boilingC !== undefined ? [boilingC + 273.15] : [];
+  });
+  return points.length > 0 ? Math.min(...points) : undefined;
+}
+
+function litresOf(rows: readonly SolventAmount[]): number {
+  return rows.reduce((sum, row) => {
+    const solvent = solventByKey(row.solvent);
+    return solvent ? sum + row.amount / molesInVolume(solvent, 1) : sum;
+  }, 0);
+}
+
+/** Sized solvents, and the unsized mixtures at a usual size. */
+function allSolventsOf(vessel: Vessel): readonly SolventAmount[] {
+  if (vessel.unsized.length === 0) return merged(vessel.solvents);
+  const largest = Math.max(
+    0,
+    ...vessel.charges.map((charge) => (charge.compound.carbonyl && charge.total?.value) || 0),
+  );
+  const usual = largest > 0 ? largest / USUAL_MOLARITY : USUAL_VOLUME_L;
+  const each = Math.max(usual, litresOf(vessel.solvents)) / vessel.unsized.length;
+  return merged([...vessel.solvents, ...vessel.unsized.flatMap((parts) => phraseAmounts(parts, each))]);
+}
+
+function merged(rows: readonly SolventAmount[]): readonly SolventAmount[] {
+  const sums = new Map<string, number>();
+  for (const { solvent, amount } of rows) {
+    if (amount > 0 && Number.isFinite(amount)) sums.set(solvent, (sums.get(solvent) ?? 0) + amount);
+  }
+  return [...sums].map(([solvent, amount]) => ({ solvent, amount }));
+}
+
+/** The vessel as the equilibrium stage takes it, and the mention of each carbonyl row. */
+export function contentsOf(vessel: Vessel): {
+  readonly contents: Contents;
+  readonly carbonylMentions: readonly number[];
+  readonly volumeStated: boolean;
+} {
+  const carbonyls = vessel.charges.filter((charge) => charge.compound.carbonyl);
+  const solutes = vessel.charges.filter((charge) => !charge.compound.carbonyl && !countsAsSolvent(charge.compound));
+  const solvents = allSolventsOf(vessel);
+  const row = vessel.buffer ? bufferByKey(vessel.buffer.buffer) : undefined;
+  const pH =
+    vessel.pH ?? (row ? usualPH(row, vessel.temperatureK) : undefined) ?? pHFromCharges(vessel.charges, solvents);
+  const contents: Contents = {
+    temperatureK: vessel.temperatureK,
+    ...(pH === undefined ? {} : { pH }),
+    solvents,
+    carbonyls: carbonyls.map(({ compound, total }) => ({ compound, amount: total?.value ?? 0 })),
+    solutes: solutes.map(({ compound, total }) => ({ compound, amount: total?.value ?? 0 })),
+    ...(vessel.buffer ? { buffer: vessel.buffer } : {}),
+  };
+  return {
+    contents,
+    carbonylMentions: carbonyls.map((charge) => charge.mention),
+    volumeStated: vessel.unsized.length === 0,
+  };
+}
