@@ -54,7 +54,7 @@ function chemicalFault(
     const written = scanned[i];
     const label = molecule.getAtomLabel(i);
     const at = written ? { at: written.at } : {};
-    if (molecule.getFreeValence(i) < 0)
+    if (NON_METALS.has(label) && molecule.getFreeValence(i) < 0)
       return {
         problem: `${label} has ${molecule.getOccupiedValence(i)} bonds; at most ${molecule.getMaxValence(i)} fit`,
         ...at,
