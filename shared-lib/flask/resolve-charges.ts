@@ -22,9 +22,13 @@ export function resolveCharges(reading: NoteReading, lexicon?: Lexicon): readonl
     const equivalents = writtenQuantities(charge).equivalents;
     if (equivalents) written.set(index, equivalents.base);
   });
-  const steps = [...new Set(first.map((charge) => charge.step))];
-  const resolved = steps.flatMap((step) => {
-    const charges = first.filter((charge) => charge.step === step);
+  const bySteps = new Map<number, ResolvedCharge[]>();
+  for (const charge of first) {
+    const step = bySteps.get(charge.step);
+    if (step) step.push(charge);
+    else bySteps.set(charge.step, [charge]);
+  }
+  const resolved = [...bySteps.values()].flatMap((charges) => {
     const one = equivalentOfStep(charges, written);
     if (!one) return charges;
     return charges.map((charge) => {

@@ -32,18 +32,18 @@ export function buildTimeline(reading: NoteReading, settings: Settings, lexicon?
   const vessels = new Map<string, Vessel>();
   const ended = new Set<number>();
   const moments: FlaskMoment[] = [];
-  reading.events.forEach((event, index) => {
+  for (const [index, event] of reading.events.entries()) {
     if (event.kind === "quench" || event.kind === "work-up") ended.add(event.step);
-    if (ended.has(event.step)) return;
-    if (event.kind === "hold") return hold(moments, event.step, event.vessel, event.seconds);
+    if (ended.has(event.step)) continue;
+    if (event.kind === "hold") hold(moments, event.step, event.vessel, event.seconds);
     const key = keyOf(event.step, event.vessel);
     const before = vessels.get(key) ?? emptyVessel(room);
     const after = afterEvent(before, event, reading, byCharge, vessels);
-    if (after === before) return;
+    if (after === before) continue;
     vessels.set(key, after);
     if (event.kind === "transfer") vessels.delete(keyOf(event.step, event.from));
     moments.push(momentOf(after, event, index));
-  });
+  }
   return { charges, moments };
 }
 

@@ -1,0 +1,89 @@
+/** Joins reading, flask and equilibrium step by step, so that each finding can look at one thing. */
+
+import { writtenQuantities } from "../flask/charge-quantities.ts";
+import { equivalentOfStep } from "../flask/equivalent-of-step.ts";
+import type { ResolvedCharge, SpeciatedMoment } from "../flask/types.ts";
+import type { NoteEvent } from "../notes/types.ts";
+import { decideStepKind, factsOf } from "./step-kinds/decide.ts";
+import type { AdviceContext, AdviceInput, CarbonylView, StepView } from "./types.ts";
+
+/** Everything that findings look at. Time is linear in events and charges. */
+export function contextOf(input: AdviceInput): AdviceContext {
+  const charges = grouped(input.timeline.charges, (charge) => charge.step);
+  const moments = grouped(input.moments, (moment) => moment.step);
+  const events = grouped(input.reading.events, (event) => event.step);
+  const unread = new Set(
+    input.reading.charges.flatMap(({ step, mention }) => (input.reading.mentions[mention]?.compound ? [] : [step])),
+  );
+  const titles = new Map(input.reading.steps.map((step) => [step.number, step]));
+  const steps = [...charges.keys()].map((number): StepView => {
+    const own = charges.get(number) ?? [];
+    const states = moments.get(number) ?? [];
+    const decisive = decisiveMoment(states);
+    const step = titles.get(number);
+    const equivalent = equivalentOfStep(own, writtenEquivalents(input, own));
+    const decision = decideStepKind(step, factsOf(own, decisive), input.reading.directives, unread.has(number));
+    return {
+      number,
+      ...(step?.title ? { title: step.title } : {}),
+      charges: own,
+      events: events.get(number) ?? ([] as NoteEvent[]),
+      moments: states,
+      ...(decisive ? { decisive } : {}),
+      ...(equivalent ? { equivalent } : {}),
+      decision,
+    };
+  });
+  const indices = new Map(input.moments.map((moment, index) => [moment, index]));
+  return { ...input, steps, carbonyls: steps.flatMap((step) => carbonylsOf(input, step, indices)) };
+}
+
+function grouped<T>(rows: readonly T[], key: (row: T) => number): Map<number, T[]> {
+  const groups = new Map<number, T[]>();
+  for (const row of rows) {
+    const group = groups.get(key(row));
+    if (group) group.push(row);
+    else groups.set(key(row), [row]);
+  }
+  return groups;
+}
+
+function writtenEquivalents(input: AdviceInput, charges: readonly ResolvedCharge[]): Map<number, number> {
+  const written = new Map<number, number>();
+  for (const { charge } of charges) {
+    const source = input.reading.charges[charge];
+    const equivalents = source ? writtenQuantities(source).equivalents : undefined;
+    if (equivalents) written.set(charge, equivalents.base);
+  }
+  return written;
+}
+
+/** The last state of the main flask with a solvent in it; else the last state of any vessel. */
+function decisiveMoment(states: readonly SpeciatedMoment[]): SpeciatedMoment | undefined {
+  const main = states.filter((state) => (state.vessel ?? 0) === 0);
+  return main.findLast((state) => state.contents.solvents.length > 0) ?? main.at(-1) ?? states.at(-1);
+}
+
+/** The state in which the forms of a charge are told: the decisive one, or the last that holds it. */
+function stateOf(step: StepView, mention: number): SpeciatedMoment | undefined {
+  const { decisive } = step;
+  if (decisive?.carbonylMentions.includes(mention)) return decisive;
+  const holding = step.moments.filter((moment) => moment.carbonylMentions.includes(mention));
+  return holding.findLast((moment) => moment.contents.solvents.length > 0) ?? holding.at(-1);
+}
+
+function carbonylsOf(
+  input: AdviceInput,
+  step: StepView,
+  indices: ReadonlyMap<SpeciatedMoment, number>,
+): readonly CarbonylView[] {
+  return step.charges.flatMap((charge) => {
+    const mention = input.reading.mentions[charge.mention];
+    const written = input.reading.charges[charge.charge];
+    if (!charge.compound.carbonyl || !mention || !written || mention.role !== "reagent") return [];
+    const moment = stateOf(step, charge.mention);
+    const forms = moment?.speciation.carbonyls[moment.carbonylMentions.indexOf(charge.mention)];
+    if (!moment || !forms) return [];
+    return [{ charge, written, mention, step, moment, momentIndex: indices.get(moment) ?? 0, forms }];
+  });
+}

@@ -1,0 +1,71 @@
+/** Common to the findings that say how most of a carbonyl compound is bound. */
+
+import type { FormKind, Interval } from "../../model/contract.ts";
+import { percentWithBounds } from "../figures.ts";
+import { writtenBeside } from "../fixes/beside.ts";
+import type { AdviceContext, CarbonylView, RawFinding } from "../types.ts";
+import { consequenceOf, fixesForBound, insteadOfRaising } from "./say-consequence.ts";
+
+/** Sum of the shares of some kinds of form; bounds are added, which is never too narrow. */
+export function shareOf(view: CarbonylView, kinds: readonly FormKind[]): Interval {
+  let value = 0;
+  let low = 0;
+  let high = 0;
+  for (const form of view.forms.forms) {
+    if (!kinds.includes(form.kind)) continue;
+    value += form.fraction.value;
+    low += form.fraction.low;
+    high += form.fraction.high;
+  }
+  return { value, low: Math.min(low, value), high: Math.min(1, high) };
+}
+
+const FAMILIES: readonly (readonly FormKind[])[] = [
+  ["hydrate", "hydrate anion"],
+  ["hemiacetal"],
+  ["cyclic hemiacetal"],
+  ["oligomer"],
+  ["iminium or imine"],
+  ["other"],
+];
+
+/** The family of bound forms that holds most. */
+function largestFamily(view: CarbonylView): readonly FormKind[] | undefined {
+  let largest: readonly FormKind[] | undefined;
+  let most = 0;
+  for (const family of FAMILIES) {
+    const { value } = shareOf(view, family);
+    if (value <= most) continue;
+    largest = family;
+    most = value;
+  }
+  return largest;
+}
+
+/**
+ * Findings for every carbonyl charge of which at least `boundShare` is bound, mostly as these kinds of form, unless nothing
+ * would be changed or the forms are already written beside the charge.
+ */
+export function lookForBound(
+  context: AdviceContext,
+  kind: FormKind,
+  noun: string,
+  concerns: (view: CarbonylView) => boolean = () => true,
+): readonly RawFinding[] {
+  return context.carbonyls.flatMap((view) => {
+    const { forms, charge, mention } = view;
+    if (forms.outside !== undefined || forms.forms.length === 0 || !concerns(view)) return [];
+    if (1 - forms.free.value < context.settings.boundShare) return [];
+    const family = largestFamily(view);
+    if (!family?.includes(kind) || writtenBeside(context.text, view)) return [];
+    const said = consequenceOf(context, view);
+    if (!said) return [];
+    const share = percentWithBounds(shareOf(view, family));
+    const free = percentWithBounds(forms.free);
+    const message = `${charge.compound.name} is ${share} ${noun} here, ${free} free: ${said.says}.${insteadOfRaising(view, said.mayRaise)}`;
+    const fixes = fixesForBound(context, view, said.mayRaise);
+    return [
+      { start: mention.start, end: mention.end, severity: said.severity, mention: charge.mention, message, fixes },
+    ];
+  });
+}

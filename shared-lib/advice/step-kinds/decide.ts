@@ -1,0 +1,63 @@
+/** Which kind a step is: the writer's directive, else what was charged, else its title, else unknown. */
+
+import type { ResolvedCharge, SpeciatedMoment } from "../../flask/types.ts";
+import { compositionOf } from "../../media/composition.ts";
+import type { Directive, Step } from "../../notes/types.ts";
+import type { StepKindDecision } from "../types.ts";
+import { STEP_KINDS } from "./list.ts";
+import type { StepFacts, StepKind } from "./types.ts";
+
+const STEP_DIRECTIVE = "step";
+
+/** Tags that make a charge no partner: it only sets the scene. */
+const SCENERY = new Set(["salt", "aldehyde", "ketone", "drying agent"]);
+
+/** What was charged, as a step kind sees it. */
+export function factsOf(charges: readonly ResolvedCharge[], decisive: SpeciatedMoment | undefined): StepFacts {
+  const tags = new Set(charges.flatMap((charge) => charge.compound.tags));
+  const carbonyls = charges.filter((charge) => charge.compound.carbonyl);
+  const parts = decisive ? compositionOf(decisive.contents.solvents, decisive.contents.temperatureK).components : [];
+  const share = (nucleophile: "water" | "alcohol") =>
+    parts.reduce((sum, part) => (part.solvent.nucleophile === nucleophile ? sum + part.volumeFraction : sum), 0);
+  const others = charges.filter(({ compound }) => !compound.carbonyl && !compound.solvent && !compound.buffer);
+  return {
+    has: (tag) => tags.has(tag),
+    aldehyde: carbonyls.some(({ compound }) => compound.carbonyl?.sites.some((site) => site.hydrogens > 0)),
+    formaldehyde: carbonyls.some(({ compound }) => compound.carbonyl?.sites.some((site) => site.hydrogens === 2)),
+    carbonyls: new Set(carbonyls.map(({ compound }) => compound.id)).size,
+    waterShare: share("water"),
+    alcoholShare: share("alcohol"),
+    buffered: decisive?.contents.buffer !== undefined,
+    alone:
+      carbonyls.length > 0 &&
+      others.every(({ compound }) => compound.tags.every((tag) => SCENERY.has(tag)) && compound.tags.length > 0),
+  };
+}
+
+/**
+ * @param unread some charge of the step has no structure: then nobody can say that the carbonyl stands alone
+ */
+export function decideStepKind(
+  step: Step | undefined,
+  facts: StepFacts,
+  directives: readonly Directive[],
+  unread: boolean,
+): StepKindDecision {
+  const said = directives.find((directive) => directive.word === STEP_DIRECTIVE && step && covers(directive, step));
+  const named = said && STEP_KINDS.find((kind) => kind.id === said.argument.trim().toLowerCase());
+  if (named) return { kind: named, by: "directive" };
+  const seen = STEP_KINDS.find((kind) => kind.sees(facts) && !(unread && restsOnAbsence(kind)));
+  if (seen && !restsOnAbsence(seen)) return { kind: seen, by: "partners" };
+  const title = step?.title?.toLowerCase();
+  const titled = title ? STEP_KINDS.find((kind) => kind.words.some((word) => title.includes(word))) : undefined;
+  if (titled) return { kind: titled, by: "title" };
+  return seen ? { kind: seen, by: "partners" } : { by: "nothing" };
+}
+
+function restsOnAbsence(kind: StepKind): boolean {
+  return kind.consequence === "nothing is consumed";
+}
+
+function covers(directive: Directive, step: Step): boolean {
+  return directive.scope.start < step.end && directive.scope.end > step.start;
+}

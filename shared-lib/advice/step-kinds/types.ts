@@ -1,0 +1,43 @@
+/** What a step does, as far as it decides what a bound share means for the charge. */
+
+import type { ReagentTag } from "../../compounds/tags.ts";
+
+/** The cases of what a bound share does to a charge. */
+export type Consequence =
+  | "free carbonyl is consumed"
+  | "the step is an equilibrium"
+  | "the hydrate reacts"
+  | "water destroys the partner"
+  | "the alcohol is the partner"
+  | "nothing is consumed";
+
+/** What a kind may look at: what was charged and where. */
+export interface StepFacts {
+  /** Some charge of the step has this tag. */
+  has(tag: ReagentTag): boolean;
+  readonly aldehyde: boolean;
+  readonly formaldehyde: boolean;
+  /** Number of different carbonyl compounds charged. */
+  readonly carbonyls: number;
+  /** Volume shares of the decisive state. */
+  readonly waterShare: number;
+  readonly alcoholShare: number;
+  readonly buffered: boolean;
+  /** Nothing but carbonyl compounds, solvents, buffers and salts. */
+  readonly alone: boolean;
+}
+
+export interface StepKind {
+  /** As a directive names it. */
+  readonly id: string;
+  readonly title: string;
+  readonly consequence: Consequence;
+  /** What binds, and what is consumed, in a sentence each. */
+  readonly binds: string;
+  readonly consumed: string;
+  readonly source: string;
+  /** Words of a title that name it, in small letters. */
+  readonly words: readonly string[];
+  /** Whether what was charged shows it. */
+  sees(facts: StepFacts): boolean;
+}
