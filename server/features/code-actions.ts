@@ -1,0 +1,78 @@
+/** Corrections of findings, and the way to silence one. */
+
+import {
+  type CodeAction,
+  CodeActionKind,
+  type CodeActionParams,
+  type Diagnostic,
+} from "vscode-languageserver-protocol";
+import type { Finding } from "../../shared-lib/advice/types.ts";
+import type { TextEdit as OffsetEdit } from "../../shared-lib/model/contract.ts";
+import type { OpenNote } from "../notes.ts";
+import { overlaps, rangeOf, spanOf } from "../ranges.ts";
+import { diagnosticsOf } from "./diagnostics.ts";
+
+/** Every correction that needs no judgement, of the whole note. */
+export const FIX_ALL = `${CodeActionKind.SourceFixAll}.oxomargin`;
+
+export function codeActionsOf(
+  note: OpenNote,
+  params: CodeActionParams,
+  options: { readonly pages: boolean },
+): CodeAction[] {
+  const wants = (kind: string): boolean =>
+    params.context.only === undefined ||
+    params.context.only.some((only) => kind === only || kind.startsWith(`${only}.`));
+  const actions: CodeAction[] = [];
+  if (wants(CodeActionKind.QuickFix)) actions.push(...quickFixes(note, params, options));
+  if (params.context.only !== undefined && wants(FIX_ALL)) actions.push(...fixAll(note));
+  return actions;
+}
+
+function quickFixes(note: OpenNote, params: CodeActionParams, options: { readonly pages: boolean }): CodeAction[] {
+  const span = spanOf(note.document, params.range);
+  const diagnostics = diagnosticsOf(note, options);
+  const here = note.analysis.findings.flatMap((finding, index) =>
+    overlaps(finding, span) ? [{ finding, diagnostic: diagnostics[index] as Diagnostic }] : [],
+  );
+  const fixes = here.flatMap(({ finding, diagnostic }) =>
+    finding.fixes.map((fix, rank) => ({
+      title: fix.title,
+      kind: CodeActionKind.QuickFix,
+      diagnostics: [diagnostic],
+      ...(fix.safe && rank === 0 ? { isPreferred: true } : {}),
+      edit: { changes: { [note.document.uri]: editsOf(note, fix.edits) } },
+    })),
+  );
+  const silences = here.map(({ finding, diagnostic }) => ({
+    title: `Silence “${finding.code}” here`,
+    kind: CodeActionKind.QuickFix,
+    diagnostics: [diagnostic],
+    edit: { changes: { [note.document.uri]: editsOf(note, [silencing(note, finding)]) } },
+  }));
+  return [...fixes, ...silences];
+}
+
+function editsOf(note: OpenNote, edits: readonly OffsetEdit[]) {
+  return edits.map((edit) => ({ range: rangeOf(note.document, edit), newText: edit.text }));
+}
+
+/** A directive on a line of its own before the paragraph's line; it governs the next line. */
+function silencing(note: OpenNote, finding: Finding): OffsetEdit {
+  const { line } = note.document.positionAt(finding.start);
+  const at = note.document.offsetAt({ line, character: 0 });
+  const end = note.document.getText().includes("\r\n") ? "\r\n" : "\n";
+  return { start: at, end: at, text: `<!-- oxomargin silence ${finding.code} -->${end}` };
+}
+
+/** Safe corrections of the whole note that do not touch each other. */
+function fixAll(note: OpenNote): CodeAction[] {
+  const taken: OffsetEdit[] = [];
+  for (const finding of note.analysis.findings) {
+    const fix = finding.fixes.find((candidate) => candidate.safe);
+    if (fix && !fix.edits.some((edit) => taken.some((other) => overlaps(edit, other)))) taken.push(...fix.edits);
+  }
+  if (taken.length === 0) return [];
+  const changes = { [note.document.uri]: editsOf(note, taken) };
+  return [{ title: "Apply every correction that needs no judgement", kind: FIX_ALL, edit: { changes } }];
+}
