@@ -9,5 +9,5 @@ export const strongHydride: StepKind = {
   consumed: "Each O-H uses up one hydride and gives hydrogen.",
   source: "common practice, no source",
   words: ["lialh4", "dibal"],
-  sees: ({ has }) => has("strong hydride"),
+  sees: ({ has }) => has("strong hydride") && has("reductant"),
 };

@@ -1,0 +1,123 @@
+/** Mass, volume, amount and equivalents of one charge do not say the same. */
+
+import { writtenQuantities } from "../../flask/charge-quantities.ts";
+import type { ResolvedCharge } from "../../flask/types.ts";
+import { amountText, massText, trimmed } from "../figures.ts";
+import { COUNTED, scaleCharge, WEIGHED } from "../fixes/scale-charge.ts";
+import type { AdviceContext, FindingRule, RawFinding, SafeFix, StepView } from "../types.ts";
+import { agrees, roundingOf, type Weighing, weighedAs, weighingOf } from "../weighing.ts";
+
+/** Without a slip that explains it, figures must differ by more than lots and rounding do (common practice, no source). */
+const UNEXPLAINED = 0.2;
+const EXPLAINED = 0.1;
+
+interface Slip {
+  readonly says: string;
+}
+
+/** The likely slip behind a weighing that does not fit its amount. */
+function slipOf(context: AdviceContext, step: StepView, charge: ResolvedCharge, weighing: Weighing): Slip | undefined {
+  const { meant, holds, massG, rounding } = weighing;
+  const fits = (mol: number) => agrees(mol, meant, rounding, 0.02);
+  if ([1000, 1e-3, 1e6, 1e-6].some((factor) => fits(holds * factor)))
+    return { says: "a factor of 1000 between the units" };
+  const { compound, form } = charge;
+  const perMole = form?.massPerMole ?? compound.molarMass;
+  if (!agrees(perMole, weighing.gramsPerMole, 0, 0.01) && fits(massG / perMole)) return { says: "the assay left out" };
+  if (weighing.by.of === "volume" && fits((weighing.by.base * 1000) / perMole)) {
+    return { says: "the density left out (millilitres taken as grams)" };
+  }
+  const other = context.lexicon
+    ?.formsOf(compound.id)
+    .find((candidate) => candidate.id !== form?.id && fits(massG / candidate.massPerMole));
+  if (other && !agrees(other.massPerMole, perMole, 0, 0.02)) return { says: `the molar mass of ${other.label}` };
+  const swapped = step.charges.find((row) => row.charge !== charge.charge && fits(massG / row.compound.molarMass));
+  return swapped ? { says: `the molar mass of ${swapped.compound.name}` } : undefined;
+}
+
+function lookAtWeighing(context: AdviceContext, step: StepView, charge: ResolvedCharge): readonly RawFinding[] {
+  const mention = context.reading.mentions[charge.mention];
+  const weighing = weighingOf(context, step, charge);
+  if (!mention || !weighing || weighing.meantBy !== "amount") return [];
+  if (agrees(weighing.holds, weighing.meant, weighing.rounding, EXPLAINED)) return [];
+  if (charge.compound.carbonyl && weighedAs(weighing, charge) !== undefined) return [];
+  const slip = slipOf(context, step, charge, weighing);
+  if (!slip && !speaksWithoutSlip(charge, weighing)) return [];
+  const because = slip ? `; the likely slip is ${slip.says}` : "";
+  const needed = massText(weighing.meant * weighing.gramsPerMole);
+  const message = `${weighing.by.text} of ${charge.compound.name} is ${amountText(weighing.holds)}, not ${amountText(weighing.meant)} (which is ${needed})${because}.`;
+  const fixes = slip ? fixesOf(context, weighing, needed) : [];
+  return [{ start: mention.start, end: mention.end, mention: charge.mention, message, fixes }];
+}
+
+/** A structure read from a name may be the misreading itself; only catalogue compounds without a usual salt or hydrate count. */
+function speaksWithoutSlip(charge: ResolvedCharge, weighing: Weighing): boolean {
+  if (!charge.compound.carbonyl || charge.compound.origin !== "catalogue" || charge.formIs === "assumed") return false;
+  return !agrees(weighing.holds, weighing.meant, weighing.rounding, UNEXPLAINED);
+}
+
+function fixesOf(context: AdviceContext, weighing: Weighing, needed: string): readonly SafeFix[] {
+  const fixes: SafeFix[] = [];
+  const weighed = scaleCharge(context.text, weighing.written, WEIGHED, weighing.meant / weighing.holds);
+  if (weighed) fixes.push({ title: `Weigh ${needed}, and keep the amount`, edits: weighed, safe: false });
+  const counted = scaleCharge(context.text, weighing.written, COUNTED, weighing.holds / weighing.meant);
+  if (counted)
+    fixes.push({ title: `Keep what is weighed: it is ${amountText(weighing.holds)}`, edits: counted, safe: false });
+  return fixes;
+}
+
+/** Equivalents against the amount, on the writer's own count of one equivalent. */
+function lookAtEquivalents(context: AdviceContext, step: StepView, charge: ResolvedCharge): readonly RawFinding[] {
+  const one = step.equivalent;
+  const written = context.reading.charges[charge.charge];
+  const mention = context.reading.mentions[charge.mention];
+  if (one?.by !== "written" || one.charge === charge.charge || !written || !mention || !countIsSure(context, step))
+    return [];
+  const { amount, equivalents } = writtenQuantities(written);
+  if (!amount || !equivalents || [amount, equivalents].some((row) => row.approximate || row.range)) return [];
+  const rounding = roundingOf(context.text, amount) + roundingOf(context.text, equivalents);
+  const meant = equivalents.base * one.mol;
+  if (agrees(meant, amount.base, rounding, EXPLAINED)) return [];
+  const actual = trimmed(amount.base / one.mol, 3);
+  const message = `${amount.text} of ${charge.compound.name} is ${actual} equiv of ${amountText(one.mol)}, not ${equivalents.text}.`;
+  const fix = scaleCharge(context.text, written, ["equivalents"], amount.base / meant);
+  const fixes = fix ? [{ title: `Keep the amount: it is ${actual} equiv`, edits: fix, safe: false }] : [];
+  return [{ start: mention.start, end: mention.end, mention: charge.mention, message, fixes }];
+}
+
+/** One charge of one equivalent, and at least two charges that agree on what that is. */
+function countIsSure(context: AdviceContext, step: StepView): boolean {
+  let ones = 0;
+  let agreeing = 0;
+  for (const { charge } of step.charges) {
+    const source = context.reading.charges[charge];
+    if (!source) continue;
+    const { amount, equivalents } = writtenQuantities(source);
+    if (equivalents?.base === 1) ones += 1;
+    if (amount && equivalents && step.equivalent && agrees(amount.base / equivalents.base, step.equivalent.mol, 0, 0.1))
+      agreeing += 1;
+  }
+  return ones === 1 && agreeing >= 2;
+}
+
+export const amountsDisagree: FindingRule = {
+  code: "charge/amounts-disagree",
+  severity: "note",
+  title: "Mass, volume, amount and equivalents of one charge do not agree",
+  page: `**Looks for** a charge whose mass or volume gives another amount than the one written, or whose amount gives other equivalents than written,
+and names the likely slip: a factor of 1000, the assay or the density left out, the molar mass of another form or of another charge.
+
+**Keeps silent** within 10 % and what the written digits allow; for ranges and approximate figures; without an explaining slip, for
+compounds that are not carbonyl compounds of the catalogue (a salt, a hydrate or a misread name would explain it) and within 20 %.
+
+**Corrections** are offered only where a slip explains the difference: keep the amount and weigh accordingly, or keep what is weighed.
+
+**Sources.** Molar masses from formulas; densities from the catalogue.`,
+  look: (context) =>
+    context.steps.flatMap((step) =>
+      step.charges.flatMap((charge) => {
+        const found = lookAtWeighing(context, step, charge);
+        return found.length > 0 ? found : lookAtEquivalents(context, step, charge);
+      }),
+    ),
+};
