@@ -13,6 +13,7 @@ import { mostlyHydrated } from "./mostly-hydrated.ts";
 import { noDensity } from "./no-density.ts";
 import { notAtEquilibrium } from "./not-at-equilibrium.ts";
 import { oligomerNotReleased } from "./oligomer-not-released.ts";
+import { outOfDate } from "./out-of-date.ts";
 import { outsideModel } from "./outside-model.ts";
 import { readingProblem } from "./reading-problem.ts";
 import { ringClosed } from "./ring-closed.ts";
@@ -35,6 +36,7 @@ export const FINDINGS: readonly FindingRule[] = [
   notAtEquilibrium,
   longStandingSolution,
   outsideModel,
+  outOfDate,
   hazardCaution,
   readingProblem,
 ];
