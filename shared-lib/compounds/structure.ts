@@ -4,7 +4,7 @@
  */
 
 import { Molecule } from "openchemlib";
-import type { GraphAtom, MoleculeGraph } from "./perception/graph.ts";
+import { fragmentOf, type GraphAtom, type MoleculeGraph } from "./perception/graph.ts";
 import { type PerceivedSite, perceive } from "./perception/perceive.ts";
 import type { CarbonylSite } from "./perception/types.ts";
 import { scanSmiles } from "./smiles-syntax.ts";
@@ -96,8 +96,10 @@ function complexMetal(molecule: Molecule): string | undefined {
   return undefined;
 }
 
+type PlacedSite = PerceivedSite & Pick<CarbonylSite, "parent" | "leading">;
+
 /** Structures of the gem-diol and of the ring that the site can close. */
-function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: PerceivedSite): CarbonylSite {
+function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: PlacedSite): CarbonylSite {
   const opened = (): Molecule => {
     const copy = molecule.getCompactCopy();
     for (let bond = 0; bond < copy.getAllBonds(); bond++) {
@@ -115,6 +117,58 @@ function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: Pe
   return { ...site, hydrateSmiles, closure: { ringSize: closureOxygen.ringSize, smiles: ring.toIsomericSmiles() } };
 }
 
+/**
+ * The compound that published constants are filed under: uncharged, without stereo and isotope labels, without counterions.
+ * `undefined` for a SMILES of several different carbonyl compounds.
+ */
+function parentOf(molecule: Molecule): string | undefined {
+  const parents = new Set<string>();
+  for (const fragment of molecule.getFragments()) {
+    fragment.ensureHelperArrays(Molecule.cHelperRings);
+    if (perceive(graphOf(fragment)).sites.length === 0) continue;
+    fragment.stripStereoInformation();
+    fragment.stripIsotopInfo();
+    for (let i = 0; i < fragment.getAtoms(); i++) if (carriesProtonCharge(fragment, i)) fragment.setAtomCharge(i, 0);
+    parents.add(fragment.toIsomericSmiles());
+  }
+  return parents.size === 1 ? [...parents][0] : undefined;
+}
+
+/** A charge that a proton more or less takes away: O⁻ and S⁻, but not that of a nitro group or N-oxide; N⁺ with an H. */
+function carriesProtonCharge(molecule: Molecule, index: number): boolean {
+  const charge = molecule.getAtomCharge(index);
+  if (charge > 0) return molecule.getAtomLabel(index) === "N" && molecule.getAllHydrogens(index) > 0;
+  if (charge === 0) return false;
+  for (let k = 0; k < molecule.getConnAtoms(index); k++)
+    if (molecule.getAtomCharge(molecule.getConnAtom(index, k)) > 0) return false;
+  return ["O", "S"].includes(molecule.getAtomLabel(index));
+}
+
+/** Aldehydes before ketones, then what has more acyl groups, then more withdrawing groups: the site that takes the water first. */
+function leadingOf(sites: readonly PerceivedSite[]): PerceivedSite | undefined {
+  return [...sites].sort(
+    (a, b) => b.hydrogens - a.hydrogens || b.acyl - a.acyl || b.sigmaStar - a.sigmaStar || a.atom - b.atom,
+  )[0];
+}
+
+function isLike(a: PerceivedSite, b: PerceivedSite | undefined): boolean {
+  return b !== undefined && a.hydrogens === b.hydrogens && a.acyl === b.acyl && a.class === b.class;
+}
+
+function carbonylOf(molecule: Molecule): Pick<StructureReading & { ok: true }, "carbonyl" | "outside"> {
+  const graph = graphOf(molecule);
+  const seen = perceive(graph);
+  if (seen.outside !== undefined) return { outside: seen.outside };
+  const parent = parentOf(molecule);
+  if (parent === undefined) return { outside: "it holds two different carbonyl compounds: write one at a time" };
+  // Of a salt with two like ions, one stands for both.
+  const fragment = fragmentOf(graph, seen.sites[0]?.atom ?? 0);
+  const own = seen.sites.filter((site) => fragment.has(site.atom));
+  const leading = leadingOf(own);
+  const sites = own.map((site) => withProducts(molecule, { ...site, parent, leading: isLike(site, leading) }));
+  return { carbonyl: { sites, ionisable: seen.ionisable } };
+}
+
 function read(smiles: string): StructureReading {
   const parsed = parse(smiles);
   if ("problem" in parsed) return { ok: false, ...parsed };
@@ -129,10 +183,7 @@ function read(smiles: string): StructureReading {
     };
     const metal = complexMetal(molecule);
     if (metal) return { ...known, outside: `it holds ${metal}: the model knows no metal complexes` };
-    const seen = perceive(graphOf(molecule));
-    if (seen.outside !== undefined) return { ...known, outside: seen.outside };
-    const sites = seen.sites.map((site) => withProducts(molecule, site));
-    return { ...known, carbonyl: { sites, ionisable: seen.ionisable } };
+    return { ...known, ...carbonylOf(molecule) };
   } catch (error) {
     return { ok: false, problem: `the structure cannot be worked out: ${firstMessage(error)}` };
   }

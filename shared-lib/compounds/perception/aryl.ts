@@ -64,28 +64,36 @@ function substituent(
   return row ? { row, extrapolated: false } : { row: nearestKin(graph, index), extrapolated: true };
 }
 
+function letterOf(graph: MoleculeGraph, member: number): string {
+  const atom = atomAt(graph, member);
+  if (atom.element === "C") return "c";
+  if (atom.element !== "N") return atom.element.toLowerCase();
+  if (atom.charge > 0) return atom.neighbours.some((bond) => atomAt(graph, bond.atom).element === "O") ? "n" : "[n+]";
+  return atom.hydrogens > 0 || atom.neighbours.length === 3 ? "[n]" : "n";
+}
+
 function ringName(graph: MoleculeGraph, ring: readonly number[], ipso: number): string {
   const hetero = ring.filter((member) => atomAt(graph, member).element !== "C");
   if (hetero.length === 0) return ring.length === 6 ? "benzene" : `C${ring.length}`;
   const place = ring.indexOf(ipso);
-  const letters = [...ring.slice(place), ...ring.slice(0, place)].map((member) => {
-    const atom = atomAt(graph, member);
-    return atom.element === "C"
-      ? "c"
-      : atom.element === "N" && (atom.hydrogens > 0 || atom.neighbours.length === 3)
-        ? "[n]"
-        : atom.element.toLowerCase();
-  });
+  const letters = [...ring.slice(place), ...ring.slice(0, place)].map((member) => letterOf(graph, member));
   const forward = letters.join("");
   const backward = [letters[0], ...letters.slice(1).reverse()].join("");
   return HETEROARYL[forward] ?? HETEROARYL[backward] ?? "heteroaryl";
 }
 
-/** Ring pattern read from the carbon that carries the carbonyl ("[n]": a pyrrole-type N). */
+/** Ring pattern read from the carbon that carries the carbonyl. [n]: a pyrrole-type N, [n+]: a protonated or quaternary one. */
 const HETEROARYL: Readonly<Record<string, string>> = {
   cccccn: "pyridine-2",
   ccccnc: "pyridine-3",
   cccncc: "pyridine-4",
+  cncccn: "pyrimidine-2",
+  cccncn: "pyrimidine-4",
+  ccncnc: "pyrimidine-5",
+  cnccnc: "pyrazine",
+  cnnccc: "pyridazine-3",
+  ccnncc: "pyridazine-4",
+  cncncn: "triazine",
   "c[n]ccc": "pyrrole-2",
   "ccc[n]c": "pyrrole-3",
   cccco: "furan-2",
@@ -94,11 +102,26 @@ const HETEROARYL: Readonly<Record<string, string>> = {
   cccsc: "thiophene-3",
   "c[n]ccn": "imidazole-2",
   "c[n]cnc": "imidazole-4",
+  "cnc[n]c": "imidazole-4",
+  "cn[n]cc": "pyrazole-3",
+  "c[n]ncc": "pyrazole-3",
   "ccn[n]c": "pyrazole-4",
   "cc[n]nc": "pyrazole-4",
-  ccnccs: "thiazole",
   cnccs: "thiazole-2",
-  cncccn: "pyrimidine-2",
+  cncsc: "thiazole-4",
+  cscnc: "thiazole-5",
+  cncco: "oxazole-2",
+  cncoc: "oxazole-4",
+  cocnc: "oxazole-5",
+  cnocc: "isoxazole-3",
+  ccnoc: "isoxazole-4",
+  concc: "isoxazole-5",
+  "ccccc[n+]": "pyridinium-2",
+  "cccc[n+]c": "pyridinium-3",
+  "ccc[n+]cc": "pyridinium-4",
+  "c[n]cc[n+]": "imidazolium-2",
+  "c[n]c[n+]c": "imidazolium-4",
+  "c[n+]c[n]c": "imidazolium-4",
 };
 
 function positionOf(ring: readonly number[], ipso: number, member: number): number {

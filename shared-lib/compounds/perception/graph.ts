@@ -27,7 +27,7 @@ export function othersOf(graph: MoleculeGraph, index: number, from: number): Gra
   return atomAt(graph, index).neighbours.filter((bond) => bond.atom !== from);
 }
 
-/** Has a double bond to O (or to S, when `withSulfur`). */
+/** Has a double bond to O. */
 export function hasOxo(graph: MoleculeGraph, index: number): boolean {
   return atomAt(graph, index).neighbours.some((bond) => bond.order === 2 && atomAt(graph, bond.atom).element === "O");
 }
@@ -38,4 +38,11 @@ export function smallestRing(graph: MoleculeGraph, index: number): MoleculeGraph
   for (const ring of graph.rings)
     if (ring.atoms.includes(index) && (!best || ring.atoms.length < best.atoms.length)) best = ring;
   return best;
+}
+
+/** Atoms bonded, however remotely, to `start`: the fragment that holds it. */
+export function fragmentOf(graph: MoleculeGraph, start: number): ReadonlySet<number> {
+  const found = new Set([start]);
+  for (const atom of found) for (const bond of atomAt(graph, atom).neighbours) found.add(bond.atom);
+  return found;
 }

@@ -37,6 +37,8 @@ const BARE: Readonly<Record<string, number>> = {
 const ATTENUATION = 0.36;
 const CARBON_ATTENUATION = 0.4;
 const PER_CARBON = -0.1;
+/** Donation of alkyls further out dies away faster: n-C3H7 −0.12, n-C5H11 −0.14, cyclo-C6H11 −0.18. */
+const ALKYL_ATTENUATION = 0.15;
 /** Three strong groups on one carbon fall short of additivity: CCl3 2.65 and CF3 2.61 against a sum of 3.2 and 3.4. */
 const SATURATION = [1, 1, 0.95, 0.8] as const;
 
@@ -56,7 +58,7 @@ function carbonGroup(graph: MoleculeGraph, index: number, from: number, depth: n
     const element = atomAt(graph, bond.atom).element;
     const sigma = depth >= DEEPEST ? 0 : groupSigma(graph, bond.atom, index, depth + 1).sigma;
     if (element !== "C") sum += ATTENUATION * sigma;
-    else sum += PER_CARBON + CARBON_ATTENUATION * Math.max(sigma, -0.3);
+    else sum += PER_CARBON + (sigma < 0 ? ALKYL_ATTENUATION * Math.max(sigma, -0.3) : CARBON_ATTENUATION * sigma);
     if (sigma > 2) strong++;
   }
   return sum * (SATURATION[Math.min(strong, 3)] ?? 1);
@@ -70,19 +72,24 @@ function aromaticGroup(graph: MoleculeGraph, index: number): number {
   return 0.61 + 0.47 * near;
 }
 
-/** Acyl groups: acid 2.08, ester 2.00, amide 1.66, aldehyde 2.15, ketone 1.65, carboxylate −1.06. */
+/**
+ * Acyl groups as they act over a CH2, back-calculated with the attenuation from the table's CH2COOH 1.05, CH2COOCH3 1.06, CH2CONH2 0.31,
+ * CH2CHO 0.62 and CH2COCH3 0.60; carboxylate −1.06 (recalled).
+ */
 function acylGroup(graph: MoleculeGraph, index: number, from: number): number {
   for (const bond of othersOf(graph, index, from)) {
     const atom = atomAt(graph, bond.atom);
     if (bond.order === 2) continue;
-    if (atom.element === "O") return atom.charge < 0 ? -1.06 : atom.hydrogens > 0 ? 2.08 : 2.0;
-    if (atom.element === "N") return 1.66;
-    if (BARE[atom.element] !== undefined) return 2.4;
+    if (atom.element === "O") return atom.charge < 0 ? -1.06 : 2.63;
+    if (atom.element === "N") return 0.8;
+    if (BARE[atom.element] !== undefined) return 2.6;
   }
-  return atomAt(graph, index).hydrogens > 0 ? 2.15 : 1.65;
+  return 1.5;
 }
 
 function groupSigma(graph: MoleculeGraph, index: number, from: number, depth: number): SigmaStar {
+  if (depth > 0 && hasOxo(graph, index) && atomAt(graph, index).element === "C")
+    return { sigma: acylGroup(graph, index, from), extrapolated: true };
   const signature = groupSignature(graph, index, from);
   const tabled = signature === undefined ? undefined : TABLE[signature];
   if (tabled !== undefined) return { sigma: tabled, extrapolated: false };

@@ -33,6 +33,12 @@ export interface CarbonylSite {
   readonly sigmaStar: number;
   /** Number of acyl groups (C=O directly attached). */
   readonly acyl: number;
+  /** What the other side of each of those acyl groups is; `oxo` is an aldehyde's or ketone's. */
+  readonly acylKinds: readonly ("acid" | "carboxylate" | "ester" | "amide" | "oxo" | "derivative")[];
+  /** Number of C=O two bonds away over an sp3 carbon (as in CH2COOH on the carbonyl). */
+  readonly betaAcyl: number;
+  /** Number of C=C, C≡C or C≡N in conjugation with it. */
+  readonly conjugated: number;
   /** An acyl group on it is a carboxylate as written. */
   readonly carboxylate?: boolean;
   /** Of an aryl on the carbonyl: Σσ⁺ of its substituents by position, and which stand ortho. */
@@ -40,6 +46,8 @@ export interface CarbonylSite {
     readonly sigmaPlus: number;
     readonly ring: string;
     readonly ortho: readonly string[];
+    /** Aromatic rings on the carbonyl carbon. */
+    readonly count: number;
   };
   /** Ring that holds the carbonyl carbon, if any. */
   readonly ringSize?: number;
@@ -47,6 +55,10 @@ export interface CarbonylSite {
   readonly extrapolated: boolean;
   /** Ring that an OH of the molecule can close on this carbon (5, 6, 7 members), with the SMILES of that hemiacetal. */
   readonly closure?: { readonly ringSize: 5 | 6 | 7; readonly smiles: string };
+  /** Canonical SMILES of the compound itself: uncharged, without counterions, stereo and isotope labels. */
+  readonly parent: string;
+  /** Takes the water first among unlike sites: a constant published for the compound is that of this site. */
+  readonly leading: boolean;
   /** SMILES of the gem-diol at this site. */
   readonly hydrateSmiles: string;
 }

@@ -1,0 +1,238 @@
+/** A whole note: blocks in order, steps, charges, media and events. Never throws; linear in the length of the text. */
+
+import type { Lexicon } from "../compounds/lexicon.ts";
+import type { StructureToolkit } from "../compounds/types.ts";
+import { DEFAULT_SETTINGS, type Settings } from "../model/settings.ts";
+import { moved } from "../model/span.ts";
+import { type Block, readBlocks } from "./blocks.ts";
+import { readConditions } from "./conditions.ts";
+import { readDirectives } from "./directives.ts";
+import { statedForm } from "./forms.ts";
+import { mixtureOf } from "./media.ts";
+import { type BlockReading, readBlock } from "./read-block.ts";
+import { absurdities } from "./sanity.ts";
+import type { Item } from "./scan.ts";
+import type { Charge, MediumPhrase, Mention, NoteEvent, NoteReading, Quantity, ReadingProblem, Step } from "./types.ts";
+
+export interface ReadOptions {
+  readonly format: "markdown" | "plain";
+  readonly lexicon: Lexicon;
+  readonly structures?: StructureToolkit | undefined;
+  readonly settings?: Settings | undefined;
+}
+
+/** Larger notes are read up to here, and that is said. */
+const MOST_CHARACTERS = 20_000_000;
+
+type NameItem = Item & { kind: "name" };
+
+interface Draft {
+  readonly mentions: Mention[];
+  readonly charges: Charge[];
+  readonly media: MediumPhrase[];
+  readonly events: NoteEvent[];
+  readonly steps: { number: number; start: number; end: number; title?: string }[];
+  readonly problems: ReadingProblem[];
+  needsStructures: boolean;
+  title: string | undefined;
+  /** The step at hand has been worked up: the next charge begins another. */
+  workedUp: boolean;
+  solvents: string[];
+}
+
+function at(quantity: Quantity, by: number): Quantity {
+  return { ...moved(quantity, by), number: moved(quantity.number, by) };
+}
+
+function openStep(draft: Draft, start: number): void {
+  const number = draft.steps.length + 1;
+  draft.steps.push({ number, start, end: start, ...(draft.title ? { title: draft.title } : {}) });
+  draft.workedUp = false;
+  draft.solvents = [];
+}
+
+/** Solvent that the words of a charge say it is dissolved in. */
+function dissolvedIn(reading: BlockReading, name: number): string | undefined {
+  const { items } = reading.scan;
+  const binding = reading.bindings.get(name);
+  for (const inside of binding?.inside ?? []) {
+    const item = items[inside];
+    if (item?.kind === "name" && item.match.compound.solvent) return item.match.compound.solvent;
+  }
+  const near = items.slice(Math.max(0, name - 4), Math.min(items.length, (binding?.last ?? name) + 1));
+  if (near.some((item) => item.kind === "word" && ["aqueous", "aq", "water", "formalin"].includes(item.word)))
+    return "water";
+  const behind = items[name + 1];
+  const inWord = behind?.kind === "word" && behind.word === "solution" ? items[name + 2] : behind;
+  const solvent = items[name + (inWord === behind ? 2 : 3)];
+  const strong = binding?.amounts.some((amount) => amount.of === "concentration" || amount.of === "assay");
+  if (strong && inWord?.kind === "word" && inWord.word === "in" && solvent?.kind === "name")
+    return solvent.match.compound.solvent;
+  return undefined;
+}
+
+function mentionOf(reading: BlockReading, name: number, block: Block, options: ReadOptions): Mention {
+  const item = reading.scan.items[name] as NameItem;
+  const { compound, form } = item.match;
+  const stated = statedForm(
+    compound,
+    form,
+    reading.bindings.get(name)?.amounts ?? [],
+    dissolvedIn(reading, name),
+    options.lexicon,
+  );
+  return {
+    start: block.start + item.start,
+    end: block.start + item.end,
+    text: block.text.slice(item.start, item.end),
+    name: compound.name,
+    smiles: compound.smiles,
+    compound,
+    ...(stated.form ? { form: stated.form } : {}),
+    role: reading.roles.get(name) ?? "other",
+    carbonyl: compound.carbonyl !== undefined,
+  };
+}
+
+function isCharge(mention: Mention, amounts: readonly Quantity[]): boolean {
+  return (
+    mention.role === "reagent" &&
+    amounts.some(
+      (amount) =>
+        amount.of === "mass" || amount.of === "volume" || amount.of === "amount" || amount.of === "equivalents",
+    )
+  );
+}
+
+function needsAqueous(mention: Mention, amounts: readonly Quantity[]): boolean {
+  const dissolved = amounts.some((amount) => amount.of === "concentration");
+  return (
+    dissolved && (mention.compound?.tags.some((tag) => ["acid", "strong acid", "base", "salt"].includes(tag)) ?? false)
+  );
+}
+
+function addCharge(
+  draft: Draft,
+  reading: BlockReading,
+  name: number,
+  mentionIndex: number,
+  block: Block,
+  step: number,
+): void {
+  const binding = reading.bindings.get(name);
+  const mention = draft.mentions[mentionIndex] as Mention;
+  const amounts = (binding?.amounts ?? []).map((quantity) => at(quantity, block.start));
+  if (!isCharge(mention, amounts)) return;
+  const solvent = dissolvedIn(reading, name) ?? (needsAqueous(mention, amounts) ? "water" : undefined);
+  const start = Math.min(mention.start, ...amounts.map((amount) => amount.start));
+  const end = Math.max(mention.end, ...amounts.map((amount) => amount.end));
+  draft.problems.push(...absurdities(mention, amounts));
+  draft.charges.push({
+    mention: mentionIndex,
+    amounts,
+    span: { start, end },
+    step,
+    ...(solvent && !mention.form ? { dissolvedIn: [{ solvent, words: solvent, basis: "volume", part: 1 }] } : {}),
+  });
+  draft.events.push({ kind: "charge", charge: draft.charges.length - 1, start, end, step, vessel: 0 });
+}
+
+function addMedia(draft: Draft, reading: BlockReading, block: Block, step: number): void {
+  for (const found of reading.media) {
+    const { kind } = mixtureOf(found.parts);
+    const start = block.start + found.start;
+    const end = block.start + found.end;
+    draft.media.push({
+      start,
+      end,
+      step,
+      kind,
+      parts: found.parts,
+      ...(found.volumeL === undefined ? {} : { volumeL: found.volumeL }),
+      ...(found.pH === undefined ? {} : { pH: found.pH }),
+    });
+    draft.events.push({ kind: "medium", medium: draft.media.length - 1, start, end, step, vessel: 0 });
+    draft.solvents.push(...found.parts.flatMap((part) => part.solvent ?? []));
+  }
+}
+
+function addConditions(draft: Draft, reading: BlockReading, block: Block, step: number, options: ReadOptions): void {
+  const settings = options.settings ?? DEFAULT_SETTINGS;
+  for (const condition of readConditions(reading.scan.items, settings.roomTemperatureC, draft.solvents)) {
+    if (condition.start >= reading.workUp) break;
+    const { start, end } = moved({ start: condition.start, end: condition.end }, block.start);
+    draft.events.push({ ...condition, start, end, step, vessel: 0 });
+  }
+}
+
+/** A list item or a paragraph that carries no chemistry belongs to no step. */
+function concernsFlask(reading: BlockReading): boolean {
+  return reading.scan.items.some((item) => item.kind === "name" || item.kind === "quantity" || item.kind === "pH");
+}
+
+function readOne(draft: Draft, block: Block, options: ReadOptions): void {
+  const reading = readBlock(block, options.lexicon, options.structures);
+  draft.needsStructures ||= reading.scan.needsStructures;
+  draft.problems.push(...reading.scan.problems.map((problem) => moved(problem, block.start)));
+  if (block.kind === "heading") {
+    draft.title = block.text.replace(/^[#\s]+/, "").trim();
+    draft.workedUp = true;
+  } else if (concernsFlask(reading) && (draft.steps.length === 0 || (draft.workedUp && reading.charges)))
+    openStep(draft, block.start);
+  const step = draft.steps.at(-1);
+  const number = step?.number ?? 0;
+  for (const [name] of reading.bindings) {
+    draft.mentions.push(mentionOf(reading, name, block, options));
+    if (block.kind !== "heading" && step) addCharge(draft, reading, name, draft.mentions.length - 1, block, number);
+  }
+  if (block.kind === "heading" || !step || draft.workedUp) return;
+  step.end = block.end;
+  addMedia(draft, reading, block, number);
+  addConditions(draft, reading, block, number, options);
+  if (reading.workUp < block.text.length) {
+    draft.workedUp = true;
+    const start = block.start + reading.workUp;
+    draft.events.push({ kind: "work-up", start, end: start, step: number, vessel: 0 });
+  }
+}
+
+/**
+ * Reads a note.
+ *
+ * @param text any text; offsets in the result are UTF-16 code units of it
+ */
+export function readNote(text: string, options: ReadOptions): NoteReading {
+  const draft: Draft = {
+    mentions: [],
+    charges: [],
+    media: [],
+    events: [],
+    steps: [],
+    problems: [],
+    needsStructures: false,
+    title: undefined,
+    workedUp: false,
+    solvents: [],
+  };
+  const readable = text.length > MOST_CHARACTERS ? text.slice(0, MOST_CHARACTERS) : text;
+  if (readable.length < text.length)
+    draft.problems.push({
+      start: MOST_CHARACTERS,
+      end: text.length,
+      code: "reading/size",
+      message: `Only the first ${MOST_CHARACTERS / 1e6} million characters are read.`,
+    });
+  for (const block of readBlocks(readable, options.format)) readOne(draft, block, options);
+  const { directives, problems } = readDirectives(readable);
+  const order = (a: { start: number }, b: { start: number }): number => a.start - b.start;
+  return {
+    mentions: draft.mentions,
+    charges: draft.charges,
+    media: draft.media,
+    events: [...draft.events].sort((a, b) => a.step - b.step || order(a, b)),
+    steps: draft.steps as readonly Step[],
+    directives,
+    problems: [...draft.problems, ...problems].sort(order),
+    needsStructures: draft.needsStructures,
+  };
+}
