@@ -1,5 +1,5 @@
-/** Bundles the terminal command, the language server (Node and Web Worker) and the extension (Node and browser) into dist/. */
-import { rm } from "node:fs/promises";
+/** Bundles the terminal command, the language server (Node and Web Worker), the extension (Node and browser) and the panel into dist/. */
+import { copyFile, readdir, rm } from "node:fs/promises";
 import { type BuildOptions, build } from "esbuild";
 
 const shared: BuildOptions = {
@@ -9,6 +9,15 @@ const shared: BuildOptions = {
   target: "es2022",
   logLevel: "warning",
   outdir: "dist",
+};
+
+/** A browser cannot list a folder of an extension, so the names of the examples are put in here. */
+const exampleNotes = (await readdir("media/example-notes")).filter((name) => /\.(md|txt)$/.test(name)).sort();
+const editor: BuildOptions = {
+  ...shared,
+  external: ["vscode"],
+  format: "cjs",
+  define: { EXAMPLE_NOTES: JSON.stringify(exampleNotes) },
 };
 
 await rm("dist", { recursive: true, force: true });
@@ -25,25 +34,22 @@ await Promise.all([
     banner: { js: "import{createRequire as __cr}from'node:module';const require=__cr(import.meta.url);" },
   }),
   build({
-    ...shared,
+    ...editor,
     entryPoints: { "client-node": "client/editor/start-node.ts" },
     platform: "node",
-    format: "cjs",
-    external: ["vscode"],
     outExtension: { ".js": ".cjs" },
   }),
+  // The browser host appends .js to the name of its entry.
+  build({ ...editor, entryPoints: { "client-browser": "client/editor/start-browser.ts" }, platform: "browser" }),
   build({
     ...shared,
-    entryPoints: { "client-browser": "client/editor/start-browser.ts" },
-    platform: "browser",
-    format: "cjs",
-    external: ["vscode"],
-    outExtension: { ".js": ".cjs" },
-  }),
-  build({
-    ...shared,
-    entryPoints: { "server-worker": "server/start-worker.ts" },
+    entryPoints: {
+      "server-worker": "server/start-worker.ts",
+      structures: "server/structures-script.ts",
+      panel: "client/editor/panel/page/page.ts",
+    },
     platform: "browser",
     format: "iife",
   }),
 ]);
+await copyFile("node_modules/uplot/dist/uPlot.min.css", "dist/panel.css");

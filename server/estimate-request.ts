@@ -2,7 +2,6 @@
 
 import type { Compound } from "../shared-lib/compounds/types.ts";
 import { estimate } from "../shared-lib/equilibrium/estimate.ts";
-import { phraseAmounts } from "../shared-lib/flask/phrase-amounts.ts";
 import { readMedium } from "../shared-lib/notes/read-medium.ts";
 import { cardOfEstimate } from "../shared-lib/report/card/card.ts";
 import { type CardOptions, cardMarkdown } from "../shared-lib/report/card/card-markdown.ts";
@@ -24,10 +23,7 @@ export async function answerEstimate(
   if ("ok" in compound) return compound;
   const mediumText = given(request.medium) ?? "water";
   const medium = readMedium(mediumText, engine.lexicon());
-  if ("problem" in medium) return problem("medium", medium.problem);
-  const amounts = phraseAmounts(medium.parts, 1);
-  if (amounts.length === 0)
-    return problem("medium", `“${mediumText}” names no solvent that is known here, such as “water” or “9:1 MeOH/H2O”.`);
+  if (!medium.ok) return problem("medium", `${medium.problem}.`.replace("..", "."));
   const temperature = figureIn(given(request.temperature) ?? "25", -100, 250);
   if (temperature === undefined)
     return problem("temperature", "Give degrees Celsius between −100 and 250, such as 25.");
@@ -41,7 +37,7 @@ export async function answerEstimate(
   const result = estimate(compound, {
     input: request.what,
     mediumText,
-    medium: amounts,
+    medium: medium.amounts,
     temperatureK: temperature + 273.15,
     ...(pH === undefined ? {} : { pH }),
     ...(concentration === undefined ? {} : { concentration }),

@@ -8,7 +8,7 @@ import {
 } from "vscode-languageserver-protocol";
 import type { Finding } from "../../shared-lib/advice/types.ts";
 import type { TextEdit as OffsetEdit } from "../../shared-lib/model/contract.ts";
-import type { OpenNote } from "../notes.ts";
+import { formatOf, type OpenNote } from "../notes.ts";
 import { overlaps, rangeOf, spanOf } from "../ranges.ts";
 import { diagnosticsOf } from "./diagnostics.ts";
 
@@ -44,12 +44,14 @@ function quickFixes(note: OpenNote, params: CodeActionParams, options: { readonl
       edit: { changes: { [note.document.uri]: editsOf(note, fix.edits) } },
     })),
   );
-  const silences = here.map(({ finding, diagnostic }) => ({
-    title: `Silence “${finding.code}” here`,
-    kind: CodeActionKind.QuickFix,
-    diagnostics: [diagnostic],
-    edit: { changes: { [note.document.uri]: editsOf(note, [silencing(note, finding)]) } },
-  }));
+  const silences = here.flatMap(({ finding, diagnostic }) =>
+    silencing(note, finding).map(({ title, edit }) => ({
+      title,
+      kind: CodeActionKind.QuickFix,
+      diagnostics: [diagnostic],
+      edit: { changes: { [note.document.uri]: editsOf(note, [edit]) } },
+    })),
+  );
   return [...fixes, ...silences];
 }
 
@@ -57,12 +59,29 @@ function editsOf(note: OpenNote, edits: readonly OffsetEdit[]) {
   return edits.map((edit) => ({ range: rangeOf(note.document, edit), newText: edit.text }));
 }
 
-/** A directive on a line of its own before the paragraph's line; it governs the next line. */
-function silencing(note: OpenNote, finding: Finding): OffsetEdit {
+/**
+ * Directives that silence a finding: on a line of its own before a paragraph (it governs the next line; inside a list or a table it
+ * would break them, so there it is not offered), and at the end of the note for the whole of it.
+ */
+function silencing(note: OpenNote, finding: Finding): { readonly title: string; readonly edit: OffsetEdit }[] {
+  const text = note.document.getText();
+  const newLine = text.includes("\r\n") ? "\r\n" : "\n";
+  const plain = formatOf(note.document) === "plain";
+  const directive = (word: string): string => {
+    const words = `oxomargin: ${word} ${finding.code}`;
+    return plain ? words : `<!-- ${words} -->`;
+  };
   const { line } = note.document.positionAt(finding.start);
-  const at = note.document.offsetAt({ line, character: 0 });
-  const end = note.document.getText().includes("\r\n") ? "\r\n" : "\n";
-  return { start: at, end: at, text: `<!-- oxomargin silence ${finding.code} -->${end}` };
+  const start = note.document.offsetAt({ line, character: 0 });
+  const before = text.slice(line === 0 ? 0 : note.document.offsetAt({ line: line - 1, character: 0 }), start);
+  const opensBlock = before.trim() === "" && !"|-*+>".includes(text[start] ?? "");
+  const here = { start, end: start, text: `${directive("silence")}${newLine}` };
+  const lead = text === "" || text.endsWith("\n") ? newLine : newLine + newLine;
+  const whole = { start: text.length, end: text.length, text: `${lead}${directive("silence-file")}${newLine}` };
+  return [
+    ...(opensBlock ? [{ title: `Silence “${finding.code}” here`, edit: here }] : []),
+    { title: `Silence “${finding.code}” in this note`, edit: whole },
+  ];
 }
 
 /** Safe corrections of the whole note that do not touch each other. */

@@ -1,0 +1,17 @@
+/** Palette: reads every note of the workspace, with progress and a way to stop, and fills the view. */
+
+import * as vscode from "vscode";
+import type { FolderView } from "../folder-view.ts";
+
+export function registerCheckFolder(view: FolderView): vscode.Disposable {
+  return vscode.commands.registerCommand("oxomargin.checkFolder", () =>
+    vscode.window.withProgress(
+      {
+        location: vscode.ProgressLocation.Notification,
+        title: vscode.l10n.t("Oxomargin: reading notes"),
+        cancellable: true,
+      },
+      (progress, token) => view.fill(progress, token),
+    ),
+  );
+}
