@@ -1,4 +1,4 @@
-/** Amounts of solvents to mole and volume fractions; volumes are additive (at most 3.6 % high: CRC Handbook densities). */
+/** Amounts of solvents to mole and volume fractions; volumes are additive (at most 3.6 % high: CRC Handbook densities of aqueous mixtures). */
 
 import type { MediumKind } from "../model/contract.ts";
 import { molarVolume, type Solvent, solventByKey } from "./solvents.ts";
@@ -16,6 +16,8 @@ export interface Component {
   readonly amount: number;
   readonly moleFraction: number;
   readonly volumeFraction: number;
+  /** mol/L, of the volume of all solvents. */
+  readonly molarity: number;
 }
 
 export interface Composition {
@@ -37,12 +39,16 @@ export function compositionOf(parts: readonly MediumAmount[], temperatureK: numb
     moles += amount;
     volumeL += amount * molarVolume(solvent, temperatureK);
   }
-  const components = [...amounts].map(([solvent, amount]) => ({
-    solvent,
-    amount,
-    moleFraction: amount / moles,
-    volumeFraction: (amount * molarVolume(solvent, temperatureK)) / volumeL,
-  }));
+  const components: Component[] = [];
+  for (const [solvent, amount] of amounts) {
+    components.push({
+      solvent,
+      amount,
+      moleFraction: amount / moles,
+      volumeFraction: (amount * molarVolume(solvent, temperatureK)) / volumeL,
+      molarity: amount / volumeL,
+    });
+  }
   return { components, volumeL };
 }
 

@@ -16,13 +16,23 @@ export interface Solvent {
   readonly densitySlope: number;
   readonly boilingC?: number;
   readonly meltingC?: number;
+  /** kJ/mol at the boiling point; absent: estimated. */
+  readonly vaporizationKJ?: number;
   /** What it adds to a C=O. */
   readonly nucleophile: "water" | "alcohol" | "none";
   readonly kind: "water" | "alcohol" | "acid" | "amine" | "ketone" | "aprotic";
+  /** Neither O, N, P nor S: it does not solvate the O–H of an adduct. */
+  readonly weaklySolvating: boolean;
   /** Usual mass fraction of water in the bottle. */
   readonly bottleWater: number;
   /** Miscible with water in all proportions at 25 °C. */
   readonly miscible: boolean;
+  /** Mole fraction of water in the solvent saturated with it at 25 °C, where it takes up little. */
+  readonly waterSaturation?: number;
+  /** Expected error of ln a of water beside it. */
+  readonly sdLnWaterActivity: number;
+  /** Azeotrope with water at 1 atm. */
+  readonly azeotrope?: string;
   readonly source: string;
 }
 
@@ -48,7 +58,12 @@ export function molarVolume(solvent: Solvent, temperatureK: number): number {
   return solvent.molarMass / densityAt(solvent, temperatureK) / 1000;
 }
 
-/** mol in a volume (L) measured at 25 °C. */
-export function molesInVolume(solvent: Solvent, volumeL: number): number {
-  return volumeL / molarVolume(solvent, 298.15);
+/** mol in a volume (L) measured at a temperature (K). */
+export function molesInVolume(solvent: Solvent, volumeL: number, temperatureK = 298.15): number {
+  return volumeL / molarVolume(solvent, temperatureK);
+}
+
+/** mol in a mass (g). */
+export function molesInMass(solvent: Solvent, massG: number): number {
+  return massG / solvent.molarMass;
 }

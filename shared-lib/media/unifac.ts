@@ -1,109 +1,163 @@
 /**
  * Activity coefficients by modified UNIFAC (Dortmund): Weidlich, Gmehling, Ind. Eng. Chem. Res. 1987, 26, 1372; parameters as published up to
- * Constantinescu, Gmehling, J. Chem. Eng. Data 2016, 61, 2738; pairs never published from modified UNIFAC 2.0 (Hayer, Hasse, Jirasek 2024).
+ * Constantinescu, Gmehling, J. Chem. Eng. Data 2016, 61, 2738. A mixture with a pair that was never published is computed wholly with the
+ * predicted table of modified UNIFAC 2.0 (Hayer, Hasse, Jirasek 2024). unifac-pairs.tsv names the few pairs that are our own fits.
  */
 
-import data from "../generated/unifac.json" with { type: "json" };
+import { unifacText } from "../generated/unifac-text.ts";
 
-interface Subgroup {
-  readonly main: number;
-  readonly R: number;
-  readonly Q: number;
-}
-type Triple = readonly [number, number, number];
+type Triple = readonly number[];
 interface UnifacData {
-  readonly subgroups: Readonly<Record<string, Subgroup>>;
+  /** Subgroup → [main group, R, Q]. */
+  readonly subgroups: Readonly<Record<string, readonly [number, number, number]>>;
+  /** Solvent → subgroup → count. */
   readonly solvents: Readonly<Record<string, Readonly<Record<string, number>>>>;
   readonly pairs: Readonly<Record<string, Triple>>;
-  readonly filled: Readonly<Record<string, Triple>>;
+  readonly predicted: Readonly<Record<string, Triple>>;
 }
-const DATA = data as unknown as UnifacData;
 
-export interface UnifacResult {
-  /** ln γ in the order of the components. */
-  readonly lnGamma: readonly number[];
-  /** Some pair of groups was never published: its parameters are predicted. */
-  readonly predicted: boolean;
+let decoded: UnifacData | undefined;
+function tables(): UnifacData {
+  decoded ??= JSON.parse(unifacText) as UnifacData;
+  return decoded;
 }
 
 /** True when the model has groups for a solvent of the table. */
 export function hasGroups(solvent: string): boolean {
-  return DATA.solvents[solvent] !== undefined;
+  return tables().solvents[solvent] !== undefined;
 }
 
-/** ψ of every pair of groups at a temperature; one table for the whole mixture, never pair by pair. */
-function interactions(groups: readonly Subgroup[], temperatureK: number): { psi: number[][]; predicted: boolean } {
-  const key = (m: Subgroup, n: Subgroup): string => `${m.main}-${n.main}`;
-  const published = groups.every((m) => groups.every((n) => m.main === n.main || DATA.pairs[key(m, n)] !== undefined));
-  const table = published ? DATA.pairs : DATA.filled;
-  const psi = groups.map((m) =>
-    groups.map((n) => {
-      if (m.main === n.main) return 1;
-      const [a, b, c] = table[key(m, n)] ?? [0, 0, 0];
-      return Math.exp(-(a / temperatureK + b + c * temperatureK));
-    }),
-  );
+/** All of a mixture that does not depend on its composition, at one temperature. */
+export interface UnifacMixture {
+  readonly size: number;
+  readonly groupCount: number;
+  /** Count of group k in component i at [i × groupCount + k]. */
+  readonly counts: Float64Array;
+  readonly groupArea: Float64Array;
+  /** ψ(m, k) at [m × groupCount + k]. */
+  readonly psi: Float64Array;
+  readonly r: Float64Array;
+  readonly rPower: Float64Array;
+  readonly q: Float64Array;
+  /** Σ over the groups of a component of count × ln Γ in the pure liquid. */
+  readonly pure: Float64Array;
+  /** Some pair of groups was never published: its parameters are predicted. */
+  readonly predicted: boolean;
+}
+
+function interactions(mains: readonly number[], temperatureK: number): { psi: Float64Array; predicted: boolean } {
+  const { pairs, predicted } = tables();
+  const published = mains.every((m) => mains.every((n) => m === n || pairs[`${m}-${n}`] !== undefined));
+  const table = published ? pairs : predicted;
+  const psi = new Float64Array(mains.length ** 2).fill(1);
+  mains.forEach((m, i) => {
+    mains.forEach((n, k) => {
+      const pair = table[`${m}-${n}`];
+      if (m === n || !pair) return;
+      const [a = 0, b = 0, c = 0] = pair;
+      psi[i * mains.length + k] = Math.exp(-(a / temperatureK + b + c * temperatureK));
+    });
+  });
   return { psi, predicted: !published };
 }
 
-/** ln Γ of every group in a mixture of groups, `counts` in any unit. */
-function groupActivities(
-  counts: readonly number[],
-  groups: readonly Subgroup[],
-  psi: readonly (readonly number[])[],
-): number[] {
-  let area = 0;
-  for (let k = 0; k < groups.length; k++) area += (counts[k] as number) * (groups[k] as Subgroup).Q;
-  const theta = groups.map((group, k) => ((counts[k] as number) * group.Q) / area);
-  const denominators = groups.map((_, k) =>
-    theta.reduce((sum, t, m) => sum + t * ((psi[m] as number[])[k] as number), 0),
-  );
-  return groups.map((group, k) => {
+/** ln Γ of every group for `counts` of groups (any unit). */
+function groupActivities(counts: Float64Array, area: Float64Array, psi: Float64Array): Float64Array {
+  const n = area.length;
+  const theta = new Float64Array(n);
+  let total = 0;
+  for (let k = 0; k < n; k++) {
+    theta[k] = (counts[k] as number) * (area[k] as number);
+    total += theta[k] as number;
+  }
+  const share = new Float64Array(n);
+  const lnGamma = new Float64Array(n);
+  for (let k = 0; k < n; k++) {
+    let sum = 0;
+    for (let m = 0; m < n; m++) sum += (theta[m] as number) * (psi[m * n + k] as number);
+    share[k] = (theta[k] as number) / sum;
+    lnGamma[k] = 1 - Math.log(sum / total);
+  }
+  for (let k = 0; k < n; k++) {
     let ratio = 0;
-    for (let m = 0; m < groups.length; m++)
-      ratio += ((theta[m] as number) * ((psi[k] as number[])[m] as number)) / (denominators[m] as number);
-    return group.Q * (1 - Math.log(denominators[k] as number) - ratio);
-  });
+    for (let m = 0; m < n; m++) ratio += (share[m] as number) * (psi[k * n + m] as number);
+    lnGamma[k] = (area[k] as number) * ((lnGamma[k] as number) - ratio);
+  }
+  return lnGamma;
 }
 
 /**
- * Activity coefficients (pure liquid = 1) of a mixture.
+ * Prepares a mixture.
  *
  * @param solvents keys of the solvents table, each with groups (see `hasGroups`)
- * @param x mole fractions, adding up to 1
  */
-export function unifac(solvents: readonly string[], x: readonly number[], temperatureK: number): UnifacResult {
-  const makeup = solvents.map((solvent) => DATA.solvents[solvent] ?? {});
-  const ids = [...new Set(makeup.flatMap((groups) => Object.keys(groups)))];
-  const groups = ids.map((id) => DATA.subgroups[id] as Subgroup);
-  const counts = makeup.map((own) => ids.map((id) => own[id] ?? 0));
-  const { psi, predicted } = interactions(groups, temperatureK);
-  const size = (pick: (group: Subgroup) => number): number[] =>
-    counts.map((own) => own.reduce((sum, n, k) => sum + n * pick(groups[k] as Subgroup), 0));
-  const r = size((group) => group.R);
-  const q = size((group) => group.Q);
-  const mean = (values: readonly number[]): number =>
-    values.reduce((sum, value, i) => sum + value * (x[i] as number), 0);
-  const rMean = mean(r);
-  const qMean = mean(q);
-  const rPower = r.map((value) => value ** 0.75);
-  const rPowerMean = mean(rPower);
-  const mixed = groupActivities(
-    ids.map((_, k) => counts.reduce((sum, own, i) => sum + (own[k] as number) * (x[i] as number), 0)),
-    groups,
-    psi,
+export function prepareUnifac(solvents: readonly string[], temperatureK: number): UnifacMixture {
+  const { subgroups, solvents: makeup } = tables();
+  const own = solvents.map((solvent) => makeup[solvent] ?? {});
+  const ids = [...new Set(own.flatMap((groups) => Object.keys(groups)))];
+  const rows = ids.map((id) => subgroups[id] ?? ([0, 0, 0] as const));
+  const { psi, predicted } = interactions(
+    rows.map(([main]) => main),
+    temperatureK,
   );
-  const lnGamma = counts.map((own, i) => {
-    const pure = groupActivities(own, groups, psi);
-    const v = (r[i] as number) / rMean;
-    const f = (q[i] as number) / qMean;
-    const vPower = (rPower[i] as number) / rPowerMean;
-    const combinatorial = 1 - vPower + Math.log(vPower) - 5 * (q[i] as number) * (1 - v / f + Math.log(v / f));
-    const residual = own.reduce(
-      (sum, n, k) => (n === 0 ? sum : sum + n * ((mixed[k] as number) - (pure[k] as number))),
-      0,
-    );
-    return combinatorial + residual;
+  const n = ids.length;
+  const counts = new Float64Array(solvents.length * n);
+  own.forEach((groups, i) => {
+    ids.forEach((id, k) => {
+      counts[i * n + k] = groups[id] ?? 0;
+    });
   });
-  return { lnGamma, predicted };
+  const groupArea = Float64Array.from(rows, ([, , Q]) => Q);
+  const total = (column: 1 | 2): Float64Array =>
+    Float64Array.from(own, (_, i) =>
+      rows.reduce((sum, row, k) => sum + (counts[i * n + k] as number) * row[column], 0),
+    );
+  const r = total(1);
+  const pure = Float64Array.from(own, (_, i) => {
+    const mine = counts.subarray(i * n, (i + 1) * n);
+    const lnGamma = groupActivities(mine, groupArea, psi);
+    return mine.reduce((sum, count, k) => (count === 0 ? sum : sum + count * (lnGamma[k] as number)), 0);
+  });
+  return {
+    size: solvents.length,
+    groupCount: n,
+    counts,
+    groupArea,
+    psi,
+    r,
+    rPower: r.map((value) => value ** 0.75),
+    q: total(2),
+    pure,
+    predicted,
+  };
+}
+
+/** ln γ of every component (pure liquid = 0) at mole fractions `x`, adding up to 1. */
+export function lnGammas(mixture: UnifacMixture, x: ArrayLike<number>): Float64Array {
+  const { size, groupCount: n, counts, r, q, rPower } = mixture;
+  const mixed = new Float64Array(n);
+  let rMean = 0;
+  let qMean = 0;
+  let rPowerMean = 0;
+  for (let i = 0; i < size; i++) {
+    const xi = x[i] as number;
+    rMean += xi * (r[i] as number);
+    qMean += xi * (q[i] as number);
+    rPowerMean += xi * (rPower[i] as number);
+    for (let k = 0; k < n; k++) mixed[k] = (mixed[k] as number) + xi * (counts[i * n + k] as number);
+  }
+  const group = groupActivities(mixed, mixture.groupArea, mixture.psi);
+  const result = new Float64Array(size);
+  for (let i = 0; i < size; i++) {
+    const v = (r[i] as number) / rMean;
+    const vOverF = v / ((q[i] as number) / qMean);
+    const vPower = (rPower[i] as number) / rPowerMean;
+    let residual = -(mixture.pure[i] as number);
+    for (let k = 0; k < n; k++) {
+      const count = counts[i * n + k] as number;
+      if (count > 0) residual += count * (group[k] as number);
+    }
+    result[i] = 1 - vPower + Math.log(vPower) - 5 * (q[i] as number) * (1 - vOverF + Math.log(vOverF)) + residual;
+  }
+  return result;
 }
