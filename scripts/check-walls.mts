@@ -1,15 +1,17 @@
 /** Checks the walls of .dependency-cruiser.cjs, and that the checker really saw the code: no module seen is no wall checked. */
 import { createRequire } from "node:module";
-import { cruise, type ICruiseResult } from "dependency-cruiser";
+import { cruise, type ICruiseOptions, type ICruiseResult } from "dependency-cruiser";
 import extractTSConfig from "dependency-cruiser/config-utl/extract-ts-config";
 
 const require = createRequire(import.meta.url);
-const config = require("../.dependency-cruiser.cjs") as { forbidden: object[]; options: object };
+const config = require("../.dependency-cruiser.cjs") as ICruiseOptions["ruleSet"] & {
+  options: object;
+};
 const LEAST_MODULES = 40;
 
 const { output } = await cruise(
   ["shared-lib", "server", "client"],
-  { ...config.options, validate: true, ruleSet: { forbidden: config.forbidden } },
+  { ...config.options, validate: true, ruleSet: { forbidden: config.forbidden ?? [] } },
   undefined,
   { tsConfig: extractTSConfig("tsconfig.json") },
 );

@@ -57,6 +57,7 @@ class CatalogueLexicon implements Lexicon {
   readonly #byName = new Map<string, Entry>();
   readonly #starts = new Map<string, number>();
   readonly #byId = new Map<string, Compound>();
+  readonly #bySmiles = new Map<string, Compound>();
   readonly #byCas = new Map<string, Entry>();
   readonly #forms = new Map<string, SuppliedForm[]>();
 
@@ -89,6 +90,7 @@ class CatalogueLexicon implements Lexicon {
 
   #addCompound(compound: Compound, names: readonly string[]): void {
     this.#byId.set(compound.id, compound);
+    if (!this.#bySmiles.has(compound.smiles)) this.#bySmiles.set(compound.smiles, compound);
     for (const name of names) this.#addName(name, { compound, by: capitalsMatter(name) ? "abbreviation" : "name" });
     if (compound.cas) this.#byCas.set(compound.cas, { compound, by: "cas" });
   }
@@ -180,6 +182,10 @@ class CatalogueLexicon implements Lexicon {
 
   compound(id: string): Compound | undefined {
     return this.#byId.get(id);
+  }
+
+  bySmiles(canonicalSmiles: string): Compound | undefined {
+    return this.#bySmiles.get(canonicalSmiles);
   }
 
   formsOf(id: string): readonly SuppliedForm[] {

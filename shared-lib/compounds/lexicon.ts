@@ -11,6 +11,8 @@ export interface Lexicon {
   /** The compound that a whole string names: a name, an abbreviation, a formula or a CAS number. */
   find(whole: string, structures?: StructureToolkit): NameMatch | "needs structures" | undefined;
   compound(id: string): Compound | undefined;
+  /** The catalogue's compound of a canonical SMILES. */
+  bySmiles(canonicalSmiles: string): Compound | undefined;
   /** Forms in which a compound is bought, the usual one first. */
   formsOf(id: string): readonly SuppliedForm[];
 }

@@ -35,10 +35,6 @@ const JOINTS = new Set([
   "or",
 ]);
 
-function isSolventName(item: Item | undefined): item is Item & { kind: "name" } {
-  return item?.kind === "name" && item.match.compound.solvent !== undefined;
-}
-
 /** May the items between two solvents belong to one mixture? */
 function joined(items: readonly Item[], from: number, to: number): boolean {
   if (to - from > 14) return false;
