@@ -1,90 +1,144 @@
 /**
- * Fits the correlations for hydration constants on the table and writes shared-lib/equilibrium/constants/coefficients.json.
- * Ordinary least squares; leave-one-out residuals by the hat matrix. Run with `npm run fit`.
+ * Fits the correlation for hydration constants on the table (Bayesian linear regression from the priors of terms.ts) and writes
+ * shared-lib/equilibrium/constants/coefficients.json. The scatter of each family is set so that its leave-one-out residuals, each
+ * over its own predicted error, have unit mean square. Run with `npm run fit`.
  */
 import { writeFile } from "node:fs/promises";
-import { createStructureToolkit } from "../shared-lib/compounds/structure.ts";
-import { FAMILIES, type Family, familyOf, featuresOf } from "../shared-lib/equilibrium/constants/families.ts";
-import { measuredCompounds } from "../shared-lib/equilibrium/constants/measured.ts";
+import { type Family, TERMS } from "../shared-lib/equilibrium/constants/terms.ts";
+import { inverse, type Matrix, times } from "./fit/matrix.mts";
+import { fitPoints, type Point } from "./fit/points.mts";
+import { residualPlot } from "./fit/residual-plot.mts";
 
-const toolkit = createStructureToolkit();
+const ROUNDS = 40;
+const LEAST_SCATTER = 0.08;
 
-interface Point {
-  readonly smiles: string;
-  readonly x: readonly number[];
-  readonly y: number;
+interface Solution {
+  readonly beta: readonly number[];
+  readonly covariance: Matrix;
+  /** Leave-one-out residual and its predicted variance, by point. */
+  readonly loo: readonly { readonly residual: number; readonly variance: number }[];
+  readonly residuals: readonly number[];
 }
 
-/** Solves A x = b by elimination with pivoting. */
-function solve(a: number[][], b: number[]): number[] {
-  const n = b.length;
-  const m = a.map((row, i) => [...row, b[i] as number]);
-  for (let c = 0; c < n; c++) {
-    let pivot = c;
-    for (let r = c + 1; r < n; r++) if (Math.abs(m[r]?.[c] ?? 0) > Math.abs(m[pivot]?.[c] ?? 0)) pivot = r;
-    [m[c], m[pivot]] = [m[pivot] as number[], m[c] as number[]];
-    const top = m[c] as number[];
-    for (let r = 0; r < n; r++) {
-      if (r === c) continue;
-      const row = m[r] as number[];
-      const factor = (row[c] as number) / (top[c] as number);
-      for (let k = c; k <= n; k++) row[k] = (row[k] as number) - factor * (top[k] as number);
+function noiseOf(point: Point, scatter: ReadonlyMap<Family, number>): number {
+  return (scatter.get(point.family) as number) ** 2 + point.variance;
+}
+
+/** One regression at given scatters; leave-one-out by the leverage, which is exact for it. */
+export function regress(points: readonly Point[], scatter: ReadonlyMap<Family, number>): Solution {
+  const size = TERMS.length;
+  const normal: number[][] = TERMS.map((term, i) => TERMS.map((_, j) => (i === j ? 1 / term.prior.sd ** 2 : 0)));
+  const right = TERMS.map((term) => term.prior.mean / term.prior.sd ** 2);
+  for (const point of points) {
+    const weight = 1 / noiseOf(point, scatter);
+    for (let i = 0; i < size; i++) {
+      const xi = point.x[i] as number;
+      if (xi === 0) continue;
+      right[i] = (right[i] as number) + weight * xi * point.y;
+      for (let j = 0; j < size; j++) {
+        const row = normal[i] as number[];
+        row[j] = (row[j] as number) + weight * xi * (point.x[j] as number);
+      }
     }
   }
-  return m.map((row, i) => (row[n] as number) / (row[i] as number));
+  const covariance = inverse(normal);
+  const beta = times(covariance, right);
+  const predicted = (x: readonly number[]): number => x.reduce((sum, value, i) => sum + value * (beta[i] as number), 0);
+  const residuals = points.map((point) => point.y - predicted(point.x));
+  const loo = points.map((point, k) => {
+    const noise = noiseOf(point, scatter);
+    const own = times(covariance, point.x).reduce((sum, value, i) => sum + value * (point.x[i] as number), 0);
+    const leverage = own / noise;
+    return { residual: (residuals[k] as number) / (1 - leverage), variance: noise / (1 - leverage) };
+  });
+  return { beta, covariance, loo, residuals };
 }
 
-function leastSquares(points: readonly Point[]) {
-  const p = points[0]?.x.length ?? 0;
-  const normal = Array.from({ length: p }, (_, i) =>
-    Array.from({ length: p }, (_, j) => points.reduce((s, q) => s + (q.x[i] ?? 0) * (q.x[j] ?? 0), 0)),
+/** Repeats the regression until the scatter of each family agrees with its leave-one-out residuals. */
+export function calibrated(points: readonly Point[]): { solution: Solution; scatter: ReadonlyMap<Family, number> } {
+  const families = [...new Set(points.map((point) => point.family))];
+  let scatter = new Map<Family, number>(families.map((family) => [family, 0.25]));
+  let solution = regress(points, scatter);
+  for (let round = 0; round < ROUNDS; round++) {
+    const next = new Map<Family, number>();
+    for (const family of families) {
+      const own = points.flatMap((point, k) => (point.family === family ? [k] : []));
+      const square = own.reduce((sum, k) => {
+        const { residual, variance } = solution.loo[k] as Solution["loo"][number];
+        return sum + residual ** 2 / variance;
+      }, 0);
+      const old = scatter.get(family) as number;
+      next.set(family, Math.max(LEAST_SCATTER, old * (square / own.length) ** 0.3));
+    }
+    scatter = next;
+    solution = regress(points, scatter);
+  }
+  return { solution, scatter };
+}
+
+const rms = (values: readonly number[]): number => Math.sqrt(values.reduce((s, v) => s + v * v, 0) / values.length);
+const round = (value: number, digits = 4): number => Number(value.toFixed(digits));
+
+/** Student's t at 97.5 % over the normal's 1.96, by an expansion good to 1 % from 4 degrees of freedom. */
+function studentFactor(freedom: number): number {
+  const v = Math.max(freedom, 4);
+  return 1 + 1.21 / v + 1.4 / v ** 2;
+}
+
+function summary(points: readonly Point[], { solution, scatter }: ReturnType<typeof calibrated>) {
+  const families = [...scatter.keys()].sort();
+  return Object.fromEntries(
+    families.map((family) => {
+      const own = points.flatMap((point, k) => (point.family === family ? [k] : []));
+      return [
+        family,
+        {
+          n: own.length,
+          rmse: round(rms(own.map((k) => solution.residuals[k] as number)), 3),
+          looRmse: round(rms(own.map((k) => (solution.loo[k] as { residual: number }).residual)), 3),
+          scatter: round(scatter.get(family) as number),
+          factor: round(studentFactor(own.length - 3), 3),
+        },
+      ];
+    }),
   );
-  const right = Array.from({ length: p }, (_, i) => points.reduce((s, q) => s + (q.x[i] ?? 0) * q.y, 0));
-  const beta = solve(normal, right);
-  const residuals = points.map((q) => q.y - q.x.reduce((s, x, i) => s + x * (beta[i] ?? 0), 0));
-  const looResiduals = points.map((q, k) => {
-    const w = solve(normal, [...q.x]);
-    const leverage = q.x.reduce((s, x, i) => s + x * (w[i] ?? 0), 0);
-    return (residuals[k] as number) / (1 - leverage);
-  });
-  const rms = (values: number[]): number => Math.sqrt(values.reduce((s, v) => s + v * v, 0) / values.length);
-  return { beta, rmse: rms(residuals), looRmse: rms(looResiduals), looResiduals };
 }
 
-const pools = new Map<Family, Point[]>();
-for (const { smiles, log10 } of measuredCompounds("neutral")) {
-  const reading = toolkit.read(smiles);
-  if (!reading.ok || !reading.carbonyl) continue;
+async function main(): Promise<void> {
+  const points = fitPoints().filter((point) => !point.external);
+  const fit = calibrated(points);
+  const result = {
+    terms: TERMS.map((term) => term.name),
+    beta: fit.solution.beta.map((value) => round(value)),
+    covariance: fit.solution.covariance.map((row) => row.map((value) => round(value, 6))),
+    families: summary(points, fit),
+  };
+  TERMS.forEach((term, i) => {
+    const sd = Math.sqrt(fit.solution.covariance[i]?.[i] ?? 0);
+    console.log(
+      `${term.name.padEnd(42)} ${(result.beta[i] as number).toFixed(2).padStart(6)} ± ${sd.toFixed(2)}   prior ${term.prior.mean} ± ${term.prior.sd}`,
+    );
+  });
+  for (const [family, row] of Object.entries(result.families)) console.log(family.padEnd(16), JSON.stringify(row));
+  points.forEach((point, k) => {
+    const { residual, variance } = fit.solution.loo[k] as Solution["loo"][number];
+    if (Math.abs(residual) > 2 * Math.sqrt(variance) || Math.abs(residual) > 0.5)
+      console.log(
+        `  ${point.smiles} ${point.state} (${point.family}) leave-one-out residual ${residual.toFixed(2)}, ${(residual / Math.sqrt(variance)).toFixed(1)} sd`,
+      );
+  });
+  const target = new URL("../shared-lib/equilibrium/constants/", import.meta.url);
+  await writeFile(new URL("coefficients.json", target), `${JSON.stringify(result, undefined, 1)}\n`);
+  await writeFile(
+    new URL("residuals.svg", target),
+    residualPlot(
+      points.map((point, k) => ({
+        family: point.family,
+        x: point.y,
+        residual: (fit.solution.loo[k] as { residual: number }).residual,
+      })),
+    ),
+  );
+}
 
-  // Of unlike sites the constant in the table is that of the aldehyde, which takes the water first.
-  const site = [...reading.carbonyl.sites].sort((a, b) => b.hydrogens - a.hydrogens || b.acyl - a.acyl)[0];
-  if (!site) continue;
-  const equivalentSites = reading.carbonyl.sites.filter(
-    (other) => other.hydrogens === site.hydrogens && other.acyl === site.acyl,
-  ).length;
-  const family = familyOf(site);
-  if (!family || !FAMILIES[family].fitted) continue;
-  // The published constant counts every equivalent C=O; the correlation speaks of one.
-  const pool = pools.get(family) ?? [];
-  pool.push({
-    smiles,
-    x: featuresOf(family, site),
-    y: log10 - (equivalentSites > 1 ? Math.log10(equivalentSites) : 0),
-  });
-  pools.set(family, pool);
-}
-const result: Record<string, object> = {};
-for (const [family, points] of [...pools].sort()) {
-  const fit = leastSquares(points);
-  const round = (v: number): number => Number(v.toFixed(3));
-  result[family] = { beta: fit.beta.map(round), n: points.length, rmse: round(fit.rmse), looRmse: round(fit.looRmse) };
-  console.log(family, result[family]);
-  points.forEach((q, k) => {
-    if (Math.abs(fit.looResiduals[k] as number) > 0.4)
-      console.log("   ", q.smiles, "leave-one-out residual", round(fit.looResiduals[k] as number));
-  });
-}
-await writeFile(
-  new URL("../shared-lib/equilibrium/constants/coefficients.json", import.meta.url),
-  `${JSON.stringify(result, undefined, 2)}\n`,
-);
+if (process.argv[1]?.endsWith("fit.mts")) await main();

@@ -32,19 +32,13 @@ function shortCitation(item: CslItem): string {
   return [`${who}, ${item["container-title"] ?? ""} ${year}`, item.volume, item.page].filter((part) => part).join(", ");
 }
 
-/** Ions are filed under the neutral compound, with their state: that is how the engine asks for them. */
-function neutralised(smiles: string): string {
-  const nitro = "[N+](=O)[O-]";
-  return smiles
-    .split(nitro)
-    .map((part) => part.replaceAll("[O-]", "O").replaceAll("[nH+]", "n").replaceAll("[NH2+]", "N"))
-    .join(nitro);
-}
-
-function canonicalIn(row: TableRow): string {
-  const reading = toolkit.read(neutralised(row.cells.smiles ?? ""));
+/** Ions and salts are filed under their uncharged parent, with their state: that is how the engine asks for them. */
+function parentIn(row: TableRow): string {
+  const reading = toolkit.read(row.cells.smiles ?? "");
   if (!reading.ok) throw new Error(`${row.place}: SMILES ${row.cells.smiles}: ${reading.problem}`);
-  return reading.canonicalSmiles;
+  const parent = reading.carbonyl?.sites[0]?.parent;
+  if (parent === undefined) throw new Error(`${row.place}: SMILES ${row.cells.smiles}: ${reading.outside}`);
+  return parent;
 }
 
 function oneOf(row: TableRow, column: string, allowed: ReadonlySet<string>): string {
@@ -71,15 +65,20 @@ export const compile: CompileTables = async () => {
     "source",
     "read",
     "use",
+    "limit",
+    "fit",
   ])) {
-    const key = `${canonicalIn(row)} ${oneOf(row, "state", STATES)}`;
+    const key = `${parentIn(row)} ${oneOf(row, "state", STATES)}`;
+    const limit = oneOf(row, "limit", new Set(["", ">", "<"]));
     hydration[key] ??= [];
     hydration[key].push({
       log10: numberIn(row, "log10_K"),
       celsius: numberIn(row, "T_C"),
       source: cited(row),
       read: oneOf(row, "read", READ),
-      use: oneOf(row, "use", new Set(["yes", "no"])) === "yes",
+      use: oneOf(row, "use", new Set(["yes", "no"])) === "yes" && limit === "",
+      ...(limit === "" ? {} : { limit }),
+      ...(oneOf(row, "fit", new Set(["", "no"])) === "no" ? { external: true } : {}),
     });
   }
   const terms: Record<string, object> = {};

@@ -96,7 +96,7 @@ function complexMetal(molecule: Molecule): string | undefined {
   return undefined;
 }
 
-type PlacedSite = PerceivedSite & Pick<CarbonylSite, "parent" | "leading">;
+type PlacedSite = PerceivedSite & Pick<CarbonylSite, "parent" | "leading" | "cation">;
 
 /** Structures of the gem-diol and of the ring that the site can close. */
 function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: PlacedSite): CarbonylSite {
@@ -117,21 +117,33 @@ function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: Pl
   return { ...site, hydrateSmiles, closure: { ringSize: closureOxygen.ringSize, smiles: ring.toIsomericSmiles() } };
 }
 
+interface Parent {
+  readonly smiles: string;
+  /** A basic N is protonated as written. */
+  readonly cation: boolean;
+}
+
 /**
  * The compound that published constants are filed under: uncharged, without stereo and isotope labels, without counterions.
  * `undefined` for a SMILES of several different carbonyl compounds.
  */
-function parentOf(molecule: Molecule): string | undefined {
+function parentOf(molecule: Molecule): Parent | undefined {
   const parents = new Set<string>();
+  let cation = false;
   for (const fragment of molecule.getFragments()) {
     fragment.ensureHelperArrays(Molecule.cHelperRings);
     if (perceive(graphOf(fragment)).sites.length === 0) continue;
     fragment.stripStereoInformation();
     fragment.stripIsotopInfo();
-    for (let i = 0; i < fragment.getAtoms(); i++) if (carriesProtonCharge(fragment, i)) fragment.setAtomCharge(i, 0);
+    for (let i = 0; i < fragment.getAtoms(); i++) {
+      if (!carriesProtonCharge(fragment, i)) continue;
+      cation ||= fragment.getAtomCharge(i) > 0;
+      fragment.setAtomCharge(i, 0);
+    }
     parents.add(fragment.toIsomericSmiles());
   }
-  return parents.size === 1 ? [...parents][0] : undefined;
+  const [smiles] = parents;
+  return parents.size === 1 && smiles !== undefined ? { smiles, cation } : undefined;
 }
 
 /** A charge that a proton more or less takes away: O⁻ and S⁻, but not that of a nitro group or N-oxide; N⁺ with an H. */
@@ -165,7 +177,14 @@ function carbonylOf(molecule: Molecule): Pick<StructureReading & { ok: true }, "
   const fragment = fragmentOf(graph, seen.sites[0]?.atom ?? 0);
   const own = seen.sites.filter((site) => fragment.has(site.atom));
   const leading = leadingOf(own);
-  const sites = own.map((site) => withProducts(molecule, { ...site, parent, leading: isLike(site, leading) }));
+  const sites = own.map((site) =>
+    withProducts(molecule, {
+      ...site,
+      parent: parent.smiles,
+      ...(parent.cation ? { cation: true } : {}),
+      leading: isLike(site, leading),
+    }),
+  );
   return { carbonyl: { sites, ionisable: seen.ionisable } };
 }
 

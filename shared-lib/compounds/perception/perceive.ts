@@ -9,7 +9,7 @@ import { classOf } from "./site-class.ts";
 import type { CarbonylSite, Perception } from "./types.ts";
 
 /** A site before its product structures are drawn up (the toolkit adds those). */
-export type PerceivedSite = Omit<CarbonylSite, "hydrateSmiles" | "closure" | "parent" | "leading"> & {
+export type PerceivedSite = Omit<CarbonylSite, "hydrateSmiles" | "closure" | "parent" | "leading" | "cation"> & {
   readonly oxygen: number;
   readonly closureOxygen?: { readonly atom: number; readonly ringSize: 5 | 6 | 7 };
 };

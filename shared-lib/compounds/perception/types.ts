@@ -57,6 +57,8 @@ export interface CarbonylSite {
   readonly closure?: { readonly ringSize: 5 | 6 | 7; readonly smiles: string };
   /** Canonical SMILES of the compound itself: uncharged, without counterions, stereo and isotope labels. */
   readonly parent: string;
+  /** A basic N of the molecule is protonated as written. */
+  readonly cation?: boolean;
   /** Takes the water first among unlike sites: a constant published for the compound is that of this site. */
   readonly leading: boolean;
   /** SMILES of the gem-diol at this site. */

@@ -5,7 +5,7 @@ import type { DerivationLine } from "../../model/contract.ts";
 import { correlate } from "./correlate.ts";
 import { citationOf, type MeasuredConstant, measuredConstant } from "./measured.ts";
 import { hydrationEnthalpy, vantHoff } from "./temperature.ts";
-import type { ConstantEstimate, ConstantQuery, NoConstant } from "./types.ts";
+import type { ChargeState, ConstantEstimate, ConstantQuery, NoConstant } from "./types.ts";
 
 const STANDARD_K = 298.15;
 
@@ -35,6 +35,14 @@ function measuredLines(found: MeasuredConstant): DerivationLine[] {
   return lines;
 }
 
+/** What was measured for the compound as written, else for its uncharged parent; it speaks of the site that takes the water first. */
+function measuredAt(canonicalSmiles: string, site: CarbonylSite, state: ChargeState): MeasuredConstant | undefined {
+  if (!site.leading) return undefined;
+  const written = site.carboxylate ? "anion" : site.cation ? "cation" : "neutral";
+  const own = state === "neutral" ? written : state;
+  return measuredConstant(canonicalSmiles, own) ?? measuredConstant(site.parent, own);
+}
+
 /**
  * Hydration constant of a site at the temperature asked for.
  *
@@ -48,7 +56,7 @@ export function hydrationConstant(
   query: ConstantQuery,
 ): ConstantEstimate | NoConstant {
   const enthalpy = hydrationEnthalpy(site.class);
-  const measured = query.correlationOnly ? undefined : measuredConstant(canonicalSmiles, query.state);
+  const measured = query.correlationOnly ? undefined : measuredAt(canonicalSmiles, site, query.state);
   const lines: DerivationLine[] = [];
   let log10: number;
   let sd: number;
@@ -62,7 +70,7 @@ export function hydrationConstant(
     const best = measured.values.find((value) => value.use);
     source = best ? citationOf(best) : "table";
   } else {
-    const found = correlate(site);
+    const found = correlate(site, query.state);
     if ("outside" in found) return found;
     ({ log10, sd } = found);
     source = found.name;

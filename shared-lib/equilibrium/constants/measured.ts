@@ -10,6 +10,10 @@ export interface MeasuredValue {
   readonly source: string;
   readonly read: string;
   readonly use: boolean;
+  /** Only a bound was published. */
+  readonly limit?: "<" | ">";
+  /** Kept out of the regression, as an external check of it. */
+  readonly external?: boolean;
 }
 
 export interface MeasuredConstant {
@@ -21,7 +25,7 @@ export interface MeasuredConstant {
   readonly values: readonly MeasuredValue[];
 }
 
-const TABLE: Readonly<Record<string, readonly MeasuredValue[]>> = hydration;
+const TABLE = hydration as unknown as Readonly<Record<string, readonly MeasuredValue[]>>;
 const CITATIONS: Readonly<Record<string, string>> = citations;
 
 /** Standard deviations by how the number came here: read in the source, derived from one, recalled. */
@@ -62,4 +66,16 @@ export function measuredCompounds(state: ChargeState): readonly MeasuredConstant
   return Object.entries(TABLE)
     .filter(([key]) => key.endsWith(ending))
     .flatMap(([key, rows]) => combine(key.slice(0, -ending.length), rows) ?? []);
+}
+
+/** Published bounds (no value) of compounds in a charge state. */
+export function measuredLimits(
+  state: ChargeState,
+): readonly { readonly smiles: string; readonly value: MeasuredValue }[] {
+  const ending = ` ${state}`;
+  return Object.entries(TABLE)
+    .filter(([key]) => key.endsWith(ending))
+    .flatMap(([key, rows]) =>
+      rows.flatMap((value) => (value.limit ? [{ smiles: key.slice(0, -ending.length), value }] : [])),
+    );
 }
