@@ -1,7 +1,7 @@
 /** Joins reading, flask and equilibrium step by step, so that each finding can look at one thing. */
 
-import { writtenQuantities } from "../flask/charge-quantities.ts";
-import { equivalentOfStep } from "../flask/equivalent-of-step.ts";
+import { writtenCount } from "../flask/charge-quantities.ts";
+import { equivalentOfStep, type WrittenCount } from "../flask/equivalent-of-step.ts";
 import type { ResolvedCharge, SpeciatedMoment } from "../flask/types.ts";
 import type { NoteEvent } from "../notes/types.ts";
 import { decideStepKind, factsOf } from "./step-kinds/decide.ts";
@@ -48,12 +48,12 @@ function grouped<T>(rows: readonly T[], key: (row: T) => number): Map<number, T[
   return groups;
 }
 
-function writtenEquivalents(input: AdviceInput, charges: readonly ResolvedCharge[]): Map<number, number> {
-  const written = new Map<number, number>();
+function writtenEquivalents(input: AdviceInput, charges: readonly ResolvedCharge[]): Map<number, WrittenCount> {
+  const written = new Map<number, WrittenCount>();
   for (const { charge } of charges) {
     const source = input.reading.charges[charge];
-    const equivalents = source ? writtenQuantities(source).equivalents : undefined;
-    if (equivalents) written.set(charge, equivalents.base);
+    const count = source ? writtenCount(source) : undefined;
+    if (count) written.set(charge, count);
   }
   return written;
 }

@@ -95,6 +95,11 @@ export function agrees(a: number, b: number, rounding: number, tolerance = TOLER
   return Math.abs(a / b - 1) <= tolerance + rounding;
 }
 
+/** The writer counts molecules of a dimer or trimer, not of what they give. */
+export function countedWhole({ holds, meant, rounding }: Weighing, { form }: ResolvedCharge): boolean {
+  return form?.kind === "oligomer" && [2, 3].some((units) => agrees(holds / units, meant, rounding, ASSAY_TOLERANCE));
+}
+
 /**
  * The weighed mass fits the compound itself, although another form of it was weighed.
  *
@@ -104,6 +109,7 @@ export function weighedAs(weighing: Weighing, charge: ResolvedCharge): number | 
   const { form, compound } = charge;
   if (!form || form.kind === "neat") return undefined;
   if (agrees(weighing.holds, weighing.meant, weighing.rounding, ASSAY_TOLERANCE)) return undefined;
+  if (countedWhole(weighing, charge)) return undefined;
   const reckoned = [compound.molarMass, form.massPerMole];
   return reckoned.find((grams) => agrees(weighing.massG / grams, weighing.meant, weighing.rounding, 0.03));
 }

@@ -2,12 +2,19 @@
 
 import type { AmountOf } from "../model/contract.ts";
 import type { Charge, Quantity } from "../notes/types.ts";
+import type { WrittenCount } from "./equivalent-of-step.ts";
 
 export type WrittenQuantities = Readonly<Partial<Record<AmountOf | "density", Quantity>>>;
 
 /** A zero, a negative or an unreadable figure is no amount; the notes stage has told the writer so. */
 export function usable(quantity: Quantity): boolean {
   return Number.isFinite(quantity.base) && quantity.base > 0;
+}
+
+/** Equivalents and amount of a charge, where equivalents are written. */
+export function writtenCount(charge: Charge): WrittenCount | undefined {
+  const { equivalents, amount } = writtenQuantities(charge);
+  return equivalents ? { equivalents: equivalents.base, ...(amount ? { amount: amount.base } : {}) } : undefined;
 }
 
 /** First usable quantity of each kind, in the order of writing. */

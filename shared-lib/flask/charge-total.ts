@@ -20,6 +20,8 @@ export interface Material {
   readonly gramsPerMole: Interval;
   /** g/mL; undefined when neither the note nor the tables give it. */
   readonly density?: number;
+  /** g that hold 1 mol with the assay left out, as writers of solids reckon; not for solutions or a written assay. */
+  readonly nominalGramsPerMole?: number;
   /** mol/L; undefined when neither written nor the way the form is sold. */
   readonly molarity?: Interval;
 }
@@ -41,7 +43,8 @@ export function materialOf(compound: Compound, form: SuppliedForm | undefined, w
   const density = written.density?.base ?? form?.density ?? (isNeat ? compound.density : undefined);
   const molarity = written.concentration ? exactly(written.concentration.base) : form?.molarity;
   const gramsPerMole = { value: perMole / assay.value, low: perMole / assay.high, high: perMole / assay.low };
-  return { gramsPerMole, ...(density ? { density } : {}), ...(molarity ? { molarity } : {}) };
+  const nominal = form && form.kind !== "solution" && !written.assay ? { nominalGramsPerMole: perMole } : {};
+  return { gramsPerMole, ...nominal, ...(density ? { density } : {}), ...(molarity ? { molarity } : {}) };
 }
 
 function asWritten(quantity: Quantity): Interval {
@@ -92,18 +95,30 @@ export function figure(value: number): string {
   return String(Number(value.toPrecision(4)));
 }
 
+function fits(mol: number, amount: Interval): boolean {
+  return Math.abs(mol / amount.value - 1) <= AGREEING;
+}
+
 /** Written amount beside a weighing: agreeing, the amount stands; else the weighing, with bounds over both. */
-function reconcile(weighed: TotalOfCharge, amount: Interval, assumedForm: boolean): TotalOfCharge {
+function reconcile(
+  weighed: TotalOfCharge,
+  amount: Interval,
+  assumedForm: boolean,
+  nominalGrams: number | undefined,
+): TotalOfCharge {
   if (!weighed.total) return { ...weighed, total: amount, how: [...weighed.how, "the amount is as written"] };
   const low = Math.min(weighed.total.low, amount.low);
   const high = Math.max(weighed.total.high, amount.high);
-  const apart = Math.abs(weighed.total.value / amount.value - 1);
-  if (apart <= AGREEING)
+  if (fits(weighed.total.value, amount))
     return { ...weighed, total: { value: amount.value, low, high }, how: [...weighed.how, "as written"] };
-  const value = assumedForm ? amount.value : weighed.total.value;
-  const says = assumedForm
-    ? "the written amount is taken: the form is only assumed"
-    : "the weighing is taken: the written amount does not agree";
+  const nominal =
+    nominalGrams !== undefined && weighed.massG !== undefined && fits(weighed.massG / nominalGrams, amount);
+  const value = assumedForm || nominal ? amount.value : weighed.total.value;
+  const says = nominal
+    ? "the written amount leaves out the usual assay"
+    : assumedForm
+      ? "the written amount is taken: the form is only assumed"
+      : "the weighing is taken: the written amount does not agree";
   return { ...weighed, total: { value, low, high }, how: [...weighed.how, says] };
 }
 
@@ -123,7 +138,7 @@ export function totalOfCharge(
   const weighed = fromWeighing(written, material);
   const amount = written.amount ? asWritten(written.amount) : undefined;
   if (weighed && (weighed.total || amount))
-    return filled(amount ? reconcile(weighed, amount, assumedForm) : weighed, material);
+    return filled(amount ? reconcile(weighed, amount, assumedForm, material.nominalGramsPerMole) : weighed, material);
   if (amount) return filled({ total: amount, how: [`${written.amount?.text ?? ""} as written`] }, material);
   if (written.equivalents && equivalent) {
     const equivalents = asWritten(written.equivalents);

@@ -15,27 +15,43 @@ export interface EquivalentOfStep {
   readonly by: "written" | "smallest";
 }
 
+/** Equivalents, and the amount in mol where one is written, of a charge. */
+export interface WrittenCount {
+  readonly equivalents: number;
+  readonly amount?: number;
+}
+
+/** Counts of one step agree within this (rounding). */
+const AGREEING = 0.05;
+
+/** Beyond this many counted charges the first ones decide: a note is not a database. */
+const MOST_COUNTED = 50;
+
 /**
- * Equivalents as the writer counts them: the charge written as 1 equivalent, else the middle of what the charges with both
- * figures say; without any, the smallest reagent is the limiting one.
+ * Equivalents as the writer counts them: what most charges with both figures agree on, first of all the one written as 1
+ * equivalent; without any, the smallest reagent is the limiting one.
  *
  * @param charges of one step
- * @param written equivalents as written, by index into the reading's charges
+ * @param written by index into the reading's charges
  */
 export function equivalentOfStep(
   charges: readonly ResolvedCharge[],
-  written: ReadonlyMap<number, number>,
+  written: ReadonlyMap<number, WrittenCount>,
 ): EquivalentOfStep | undefined {
-  const counted = charges.flatMap(({ charge, total }) => {
-    const equivalents = written.get(charge);
-    return total && equivalents ? [{ charge, equivalents, mol: total.value / equivalents }] : [];
+  const counted = charges.slice(0, MOST_COUNTED).flatMap(({ charge, total }) => {
+    const { equivalents, amount = total?.value } = written.get(charge) ?? {};
+    return amount && equivalents ? [{ charge, mol: amount / equivalents, one: equivalents === 1 }] : [];
   });
-  const one = counted.find(({ equivalents }) => equivalents === 1);
-  if (one) return { mol: one.mol, charge: one.charge, by: "written" };
-  const sorted = counted.toSorted((a, b) => a.mol - b.mol);
-  const middle = sorted[Math.floor((sorted.length - 1) / 2)];
-  if (middle) return { mol: middle.mol, charge: middle.charge, by: "written" };
-  return smallestReagent(charges);
+  let best: EquivalentOfStep | undefined;
+  let most = 0;
+  for (const { charge, mol, one } of counted) {
+    const agreeing = counted.filter((other) => Math.abs(other.mol / mol - 1) <= AGREEING).length;
+    const weight = agreeing + (one ? 0.5 : 0);
+    if (weight <= most) continue;
+    best = { mol, charge, by: "written" };
+    most = weight;
+  }
+  return best ?? smallestReagent(charges);
 }
 
 function smallestReagent(charges: readonly ResolvedCharge[]): EquivalentOfStep | undefined {

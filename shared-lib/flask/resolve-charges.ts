@@ -5,9 +5,9 @@ import type { Compound } from "../compounds/types.ts";
 import type { Interval } from "../model/contract.ts";
 import type { Charge, NoteReading } from "../notes/types.ts";
 import { carriedSolvents } from "./carried-solvents.ts";
-import { writtenQuantities } from "./charge-quantities.ts";
+import { writtenCount, writtenQuantities } from "./charge-quantities.ts";
 import { materialOf, totalOfCharge } from "./charge-total.ts";
-import { equivalentOfStep } from "./equivalent-of-step.ts";
+import { equivalentOfStep, type WrittenCount } from "./equivalent-of-step.ts";
 import type { ResolvedCharge } from "./types.ts";
 import { weighedForm } from "./weighed-form.ts";
 
@@ -17,10 +17,10 @@ import { weighedForm } from "./weighed-form.ts";
  */
 export function resolveCharges(reading: NoteReading, lexicon?: Lexicon): readonly ResolvedCharge[] {
   const first = reading.charges.flatMap((charge, index) => resolve(reading, charge, index, undefined, lexicon) ?? []);
-  const written = new Map<number, number>();
+  const written = new Map<number, WrittenCount>();
   reading.charges.forEach((charge, index) => {
-    const equivalents = writtenQuantities(charge).equivalents;
-    if (equivalents) written.set(index, equivalents.base);
+    const count = writtenCount(charge);
+    if (count) written.set(index, count);
   });
   const bySteps = new Map<number, ResolvedCharge[]>();
   for (const charge of first) {
@@ -38,7 +38,8 @@ export function resolveCharges(reading: NoteReading, lexicon?: Lexicon): readonl
           ? charge
           : resolve(reading, source, charge.charge, one.mol, lexicon);
       const known = again ?? charge;
-      const equivalents = written.get(charge.charge) ?? (known.total ? known.total.value / one.mol : undefined);
+      const equivalents =
+        written.get(charge.charge)?.equivalents ?? (known.total ? known.total.value / one.mol : undefined);
       return equivalents === undefined ? known : { ...known, equivalents };
     });
   });

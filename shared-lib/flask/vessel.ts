@@ -1,7 +1,9 @@
 /** One vessel while the note is followed: what is in it, how warm, how acid. */
 
 import type { Contents } from "../equilibrium/types.ts";
-import { bufferByKey, usualPH } from "../media/buffers.ts";
+import { mixtureBoilingPoint } from "../media/boiling.ts";
+import { bufferByKey, bufferPH } from "../media/buffers.ts";
+import { compositionOf } from "../media/composition.ts";
 import { molesInVolume, solventByKey } from "../media/solvents.ts";
 import type { MediumPart, MediumPhrase } from "../notes/types.ts";
 import { pHFromCharges } from "./ph-from-charges.ts";
@@ -22,6 +24,8 @@ export interface Vessel {
   readonly temperatureK: number;
   readonly temperatureStated: boolean;
   readonly pH?: number;
+  /** pH that a buffer was written with; it moves with temperature. */
+  readonly bufferPH?: number;
   readonly pHStated: boolean;
 }
 
@@ -47,15 +51,26 @@ export function withMedium(vessel: Vessel, phrase: MediumPhrase): Vessel {
   const bufferPart = phrase.parts.find((part) => part.solvent !== undefined && bufferByKey(part.solvent));
   const buffer = bufferPart?.solvent;
   const molarity = bufferPart?.molarity;
-  const unsized = sized.length === 0 && known.length > 0 ? [...vessel.unsized, known] : vessel.unsized;
+  const fresh = known.some((part) => !alreadyIn(vessel, solventOfPart(part)?.key));
+  const unsized = sized.length === 0 && fresh ? [...vessel.unsized, known] : vessel.unsized;
   const warmed = phrase.temperatureK === undefined ? vessel : withTemperature(vessel, phrase.temperatureK);
   return {
     ...warmed,
     solvents: [...vessel.solvents, ...sized],
     unsized,
     ...(buffer ? { buffer: { buffer, ...(molarity === undefined ? {} : { molarity }) } } : {}),
-    ...(phrase.pH === undefined ? {} : { pH: phrase.pH, pHStated: true }),
+    ...(phrase.pH === undefined
+      ? {}
+      : buffer
+        ? { bufferPH: phrase.pH, pHStated: true }
+        : { pH: phrase.pH, pHStated: true }),
   };
+}
+
+/** "In water" after water has been measured in adds nothing: the words speak of the same water. */
+function alreadyIn(vessel: Vessel, key: string | undefined): boolean {
+  const named = vessel.unsized.some((parts) => parts.some((part) => solventOfPart(part)?.key === key));
+  return named || vessel.solvents.some((row) => row.solvent === key);
 }
 
 export function withTemperature(vessel: Vessel, temperatureK: number): Vessel {
@@ -77,20 +92,15 @@ export function poured(from: Vessel, into: Vessel): Vessel {
     solvents: [...into.solvents, ...from.solvents],
     unsized: [...into.unsized, ...from.unsized],
     ...(buffer ? { buffer } : {}),
+    ...((into.bufferPH ?? from.bufferPH) === undefined ? {} : { bufferPH: into.bufferPH ?? from.bufferPH }),
     ...(pH === undefined ? {} : { pH }),
     pHStated: into.pHStated || from.pHStated,
   };
 }
 
-/** Lowest boiling point of the solvents that make up a tenth of the vessel or more, K. */
+/** Boiling point of the mixture at 1 atm, K. */
 export function refluxTemperature(vessel: Vessel): number | undefined {
-  const rows = allSolventsOf(vessel);
-  const sum = rows.reduce((all, row) => all + row.amount, 0);
-  const points = rows.flatMap((row) => {
-    const boilingC = solventByKey(row.solvent)?.boilingC;
-    return row.amount >= sum / 10 && boilingC !== undefined ? [boilingC + 273.15] : [];
-  });
-  return points.length > 0 ? Math.min(...points) : undefined;
+  return mixtureBoilingPoint(compositionOf(allSolventsOf(vessel), 298.15));
 }
 
 function litresOf(rows: readonly SolventAmount[]): number {
@@ -131,7 +141,9 @@ export function contentsOf(vessel: Vessel): {
   const solvents = allSolventsOf(vessel);
   const row = vessel.buffer ? bufferByKey(vessel.buffer.buffer) : undefined;
   const pH =
-    vessel.pH ?? (row ? usualPH(row, vessel.temperatureK) : undefined) ?? pHFromCharges(vessel.charges, solvents);
+    vessel.pH ??
+    (row ? bufferPH(row, vessel.temperatureK, vessel.bufferPH) : undefined) ??
+    pHFromCharges(vessel.charges, solvents);
   const contents: Contents = {
     temperatureK: vessel.temperatureK,
     ...(pH === undefined ? {} : { pH }),

@@ -14,7 +14,8 @@ const NOT_MINDED = new Set(["acetal", "oxime", "hydrazone", "imine", "reductive-
 
 function lookAt(view: CarbonylView): readonly RawFinding[] {
   const { moment, mention, charge, step } = view;
-  if (!step.decision.kind || NOT_MINDED.has(step.decision.kind.id)) return [];
+  const { kind } = step.decision;
+  if (kind && NOT_MINDED.has(kind.id)) return [];
   const acid = moment.contents.solutes.filter(({ compound }) => compound.tags.includes("strong acid"));
   const base = moment.contents.solutes.filter(({ compound }) =>
     compound.tags.some((tag) => tag === "base" || tag.endsWith("amine")),
@@ -31,7 +32,16 @@ function lookAt(view: CarbonylView): readonly RawFinding[] {
   if (volume("alcohol") < LEAST_ALCOHOL || volume("water") > MOST_WATER) return [];
   const alcohol = parts.find(({ solvent }) => solvent.nucleophile === "alcohol")?.solvent.name ?? "the alcohol";
   const message = `${name} in ${alcohol} will turn ${charge.compound.name} into its acetal: use an aprotic solvent or more water, or add the acid last.`;
-  return [{ start: mention.start, end: mention.end, mention: charge.mention, message, fixes: [] }];
+  return [
+    {
+      start: mention.start,
+      end: mention.end,
+      mention: charge.mention,
+      severity: kind ? "note" : "hint",
+      message,
+      fixes: [],
+    },
+  ];
 }
 
 export const acetalWillForm: FindingRule = {
@@ -40,8 +50,8 @@ export const acetalWillForm: FindingRule = {
   title: "Acid and alcohol in the flask will make the acetal",
   page: `**Looks for** a strong acid in excess of the bases, in a flask that is at least half alcohol and at most a tenth water.
 
-**Keeps silent** when the acetal is the purpose, when an amine, hydroxylamine or hydrazine takes the carbonyl first, and where the kind of step is
-not known.
+**Keeps silent** when the acetal is the purpose, and when an amine, hydroxylamine or hydrazine takes the carbonyl first. Where the kind of step is
+not known it is only a hint: the acetal may be what the writer wants.
 
 **Why.** The hemiacetal that alcohol makes by itself goes on to the acetal with acid, and the acetal does not come back without water.
 

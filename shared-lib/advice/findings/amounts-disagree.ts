@@ -5,7 +5,7 @@ import type { ResolvedCharge } from "../../flask/types.ts";
 import { amountText, massText, trimmed } from "../figures.ts";
 import { COUNTED, scaleCharge, WEIGHED } from "../fixes/scale-charge.ts";
 import type { AdviceContext, FindingRule, RawFinding, SafeFix, StepView } from "../types.ts";
-import { agrees, roundingOf, type Weighing, weighedAs, weighingOf } from "../weighing.ts";
+import { agrees, countedWhole, roundingOf, type Weighing, weighedAs, weighingOf } from "../weighing.ts";
 
 /** Without a slip that explains it, figures must differ by more than lots and rounding do (common practice, no source). */
 const UNEXPLAINED = 0.2;
@@ -40,7 +40,8 @@ function lookAtWeighing(context: AdviceContext, step: StepView, charge: Resolved
   const weighing = weighingOf(context, step, charge);
   if (!mention || !weighing || weighing.meantBy !== "amount") return [];
   if (agrees(weighing.holds, weighing.meant, weighing.rounding, EXPLAINED)) return [];
-  if (charge.compound.carbonyl && weighedAs(weighing, charge) !== undefined) return [];
+  if (countedWhole(weighing, charge) || (charge.compound.carbonyl && weighedAs(weighing, charge) !== undefined))
+    return [];
   const slip = slipOf(context, step, charge, weighing);
   if (!slip && !speaksWithoutSlip(charge, weighing)) return [];
   const because = slip ? `; the likely slip is ${slip.says}` : "";

@@ -62,7 +62,7 @@ export function lookForBound(
     if (!said) return [];
     const share = percentWithBounds(shareOf(view, family));
     const free = percentWithBounds(forms.free);
-    const message = `${charge.compound.name} is ${share} ${noun} here, ${free} free: ${said.says}.${insteadOfRaising(view, said.mayRaise)}`;
+    const message = `${charge.compound.name} is ${share} ${noun} in this flask and ${free} free. ${said.says}.${insteadOfRaising(view, said.mayRaise)}`;
     const fixes = fixesForBound(context, view, said.mayRaise);
     return [
       { start: mention.start, end: mention.end, severity: said.severity, mention: charge.mention, message, fixes },

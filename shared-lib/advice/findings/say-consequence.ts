@@ -1,6 +1,7 @@
 /** What a bound share means for a charge, in words, and what may be done about it. */
 
 import type { Severity } from "../../model/contract.ts";
+import { conversionLoss } from "../conversion.ts";
 import { percent, trimmed } from "../figures.ts";
 import { besideEdit } from "../fixes/beside.ts";
 import { HOW_MUCH, scaleCharge } from "../fixes/scale-charge.ts";
@@ -18,8 +19,11 @@ export interface SaidConsequence {
   readonly mayRaise: boolean;
 }
 
+/** A loss of conversion below this is within the error of yields (common practice, no source). */
+const LEAST_LOSS = 0.02;
+
 const REFILLED = "equivalents stand, because the free share is made good as it is used up";
-const SHIFTED = "the step is an equilibrium: more equivalents or less water keep the conversion";
+const KEEP = "more equivalents or less of what binds it keep the conversion";
 
 /**
  * @returns undefined when nothing would be changed, so that nothing needs saying
@@ -28,35 +32,45 @@ export function consequenceOf(context: AdviceContext, view: CarbonylView): SaidC
   const { kind } = view.step.decision;
   const free = view.forms.free.value;
   const rate = `the rate falls to ${percent(free)} of that without binding`;
+  const title = kind?.title ?? "";
   if (context.settings.basis === "free") {
-    return { severity: "note", says: "the note counts equivalents in free carbonyl", mayRaise: true };
+    return { severity: "note", says: "The note counts equivalents in free carbonyl", mayRaise: true };
   }
   if (!kind) {
     return {
       severity: "note",
-      says: `if the free carbonyl is used up irreversibly, ${REFILLED} and ${rate}; if ${SHIFTED}`,
+      says: `If the step uses it up irreversibly, ${REFILLED}, and ${rate}; if the step is an equilibrium, ${KEEP}`,
       mayRaise: true,
     };
   }
-  const prefix = kind.title.charAt(0).toLowerCase() + kind.title.slice(1);
   switch (kind.consequence) {
     case "free carbonyl is consumed":
       return free < SLOW_SHARE
-        ? { severity: "hint", says: `${prefix}: ${REFILLED}; ${rate}`, mayRaise: false }
+        ? { severity: "hint", says: `${title}: ${REFILLED}; ${rate}`, mayRaise: false }
         : undefined;
     case "the step is an equilibrium":
-      return { severity: "note", says: `${prefix}: ${SHIFTED}`, mayRaise: true };
+      return ofEquilibrium(view, title);
     case "nothing is consumed":
-      return { severity: "note", says: `${prefix}: the next partner meets only the free share`, mayRaise: true };
+      return { severity: "note", says: `${title}: the next partner meets only the free share`, mayRaise: true };
     case "water destroys the partner":
       return {
         severity: "note",
-        says: `${prefix}: each bound O-H uses up the reagent; dry the carbonyl compound or the solvent first`,
+        says: `${title}: each bound O-H uses up the reagent; dry the carbonyl compound or the solvent first`,
         mayRaise: false,
       };
     default:
       return undefined;
   }
+}
+
+/** An equilibrium far on the side of the product loses nothing that matters; then nothing needs saying. */
+function ofEquilibrium(view: CarbonylView, title: string): SaidConsequence | undefined {
+  const loss = conversionLoss(view);
+  if (loss && loss.most < LEAST_LOSS) return undefined;
+  const range = loss
+    ? `: its conversion falls from ${percent(loss.without)} to ${percent(loss.bound)} for a usual constant, by at most ${percent(loss.most)}`
+    : "";
+  return { severity: "note", says: `${title} is an equilibrium${range}; ${KEEP}`, mayRaise: true };
 }
 
 /** The corrections that a bound share calls for. */
@@ -75,9 +89,15 @@ export function fixesForBound(context: AdviceContext, view: CarbonylView, mayRai
   return fixes;
 }
 
+function remedy(view: CarbonylView): string {
+  const ring = view.forms.forms.find((form) => form.kind === "cyclic hemiacetal");
+  if (ring && ring.fraction.value > 0.5) return "the ring opens as the partner takes the rest";
+  return "use less water or alcohol, or let the partner take the water away";
+}
+
 /** Said instead of a larger charge that would be absurd. */
 export function insteadOfRaising(view: CarbonylView, mayRaise: boolean): string {
   const times = 1 / view.forms.free.value;
   if (!mayRaise || times <= MOST_TIMES) return "";
-  return ` A larger charge does not help (${times > 1000 ? "over 1000" : trimmed(times, 2)} times as much): use less water or alcohol, or add the partner first.`;
+  return ` A larger charge does not help (${times > 1000 ? "over 1000" : trimmed(times, 2)} times as much): ${remedy(view)}.`;
 }

@@ -1,5 +1,6 @@
 /** A carbonyl charge brings water or alcohol into a step whose partner it destroys. */
 
+import type { SuppliedForm } from "../../compounds/types.ts";
 import { solventByKey } from "../../media/solvents.ts";
 import { amountText, trimmed } from "../figures.ts";
 import { switchForm } from "../fixes/switch-form.ts";
@@ -8,6 +9,12 @@ import type { AdviceContext, CarbonylView, FindingRule, RawFinding } from "../ty
 
 /** Less than this share of the partner is within its usual excess (common practice, no source). */
 const LEAST_SHARE = 0.05;
+
+/** Paraformaldehyde's few per cent of end groups count as dry here. */
+function isDry(form: SuppliedForm): boolean {
+  const wet = form.carries.reduce((sum, part) => sum + part.massFraction, 0);
+  return form.boundWater === 0 && wet < 0.1 && form.release !== "needs acid or base" && form.kind !== "hemiacetal";
+}
 
 function lookAt(context: AdviceContext, view: CarbonylView): readonly RawFinding[] {
   const partners = sensitivePartners(view.step.charges);
@@ -21,7 +28,7 @@ function lookAt(context: AdviceContext, view: CarbonylView): readonly RawFinding
   const against = reagent === undefined ? "" : `, ${trimmed(mol / reagent, 2)} equiv of ${partner.compound.name}`;
   const label = view.charge.form?.label ?? view.charge.compound.name;
   const message = `${label} brings ${names}${against}: ${partner.compound.name} is destroyed by it; take a dry form, or dry it first.`;
-  const fixes = switchForm(context, view, (form) => form.boundWater === 0 && form.carries.length === 0);
+  const fixes = switchForm(context, view, isDry);
   return [{ start: view.mention.start, end: view.mention.end, mention: view.charge.mention, message, fixes }];
 }
 

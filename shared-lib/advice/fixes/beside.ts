@@ -49,11 +49,13 @@ export function writtenBeside(
 
 /** The bound forms of a charge, largest first, and what is free. */
 export function wordsBeside(view: CarbonylView, factor = 1): string {
-  const bound = view.forms.forms
-    .filter((form) => form.kind !== "free carbonyl" && form.fraction.value >= 0.01)
-    .toSorted((a, b) => b.fraction.value - a.fraction.value)
+  const shares = new Map<string, number>();
+  for (const { kind, fraction } of view.forms.forms) shares.set(kind, (shares.get(kind) ?? 0) + fraction.value);
+  const bound = [...shares]
+    .filter(([kind, share]) => kind !== "free carbonyl" && share >= 0.01)
+    .toSorted(([, a], [, b]) => b - a)
     .slice(0, 2)
-    .map((form) => `${percent(form.fraction.value)} ${form.kind}`);
+    .map(([kind, share]) => `${percent(share)} ${kind}`);
   const total = view.charge.total;
   const free = total
     ? `${amountText(total.value * factor * view.forms.free.value)} free`

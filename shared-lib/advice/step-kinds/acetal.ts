@@ -11,5 +11,5 @@ export const acetal: StepKind = {
   source: "common practice, no source",
   words: ["acetal", "ketal", "dioxolane"],
   sees: ({ has, alcoholShare }) =>
-    (has("alcohol") || alcoholShare > 0.3) && (has("strong acid") || has("acid")) && !has("base"),
+    has("alcohol") && alcoholShare < 0.5 && (has("strong acid") || has("acid")) && !has("base"),
 };

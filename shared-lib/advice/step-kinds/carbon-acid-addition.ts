@@ -8,6 +8,13 @@ export const carbonAcidAddition: StepKind = {
   binds: "Water or alcohol holds part of the carbonyl.",
   consumed: "The addition is reversible until water leaves: the bound share lowers the conversion.",
   source: "Guthrie, Can. J. Chem. 1978, 56, 962; recalled",
+  constant: {
+    aldehyde: { value: 1.5, low: 0, high: 3.5 },
+    ketone: { value: -1, low: -2.5, high: 0.5 },
+    partners: ["carbon acid"],
+    releasesWater: false,
+    source: "Guthrie, Can. J. Chem. 1978, 56, 962 (aldol additions); recalled with a wide bound",
+  },
   words: ["aldol", "henry reaction", "nitroaldol", "knoevenagel", "claisen-schmidt"],
   sees: ({ has, carbonyls }) => has("carbon acid") || (carbonyls > 1 && has("base")),
 };

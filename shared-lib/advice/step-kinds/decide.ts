@@ -43,19 +43,32 @@ export function decideStepKind(
   directives: readonly Directive[],
   unread: boolean,
 ): StepKindDecision {
-  const said = directives.find((directive) => directive.word === STEP_DIRECTIVE && step && covers(directive, step));
+  const said = directives.findLast((directive) => directive.word === STEP_DIRECTIVE && step && covers(directive, step));
   const named = said && STEP_KINDS.find((kind) => kind.id === said.argument.trim().toLowerCase());
   if (named) return { kind: named, by: "directive" };
   const seen = STEP_KINDS.find((kind) => kind.sees(facts) && !(unread && restsOnAbsence(kind)));
   if (seen && !restsOnAbsence(seen)) return { kind: seen, by: "partners" };
   const title = step?.title?.toLowerCase();
-  const titled = title ? STEP_KINDS.find((kind) => kind.words.some((word) => title.includes(word))) : undefined;
+  const titled = title ? STEP_KINDS.find((kind) => kind.words.some((word) => holdsWord(title, word))) : undefined;
   if (titled) return { kind: titled, by: "title" };
   return seen ? { kind: seen, by: "partners" } : { by: "nothing" };
 }
 
 function restsOnAbsence(kind: StepKind): boolean {
   return kind.consequence === "nothing is consumed";
+}
+
+/** The word stands by itself, at most with a plural s. */
+function holdsWord(title: string, word: string): boolean {
+  for (let at = title.indexOf(word); at >= 0; at = title.indexOf(word, at + 1)) {
+    const end = title[at + word.length] === "s" ? at + word.length + 1 : at + word.length;
+    if (!isLetter(title[at - 1]) && !isLetter(title[end])) return true;
+  }
+  return false;
+}
+
+function isLetter(character: string | undefined): boolean {
+  return character !== undefined && character.toLowerCase() !== character.toUpperCase();
 }
 
 function covers(directive: Directive, step: Step): boolean {

@@ -8,6 +8,14 @@ export const imine: StepKind = {
   binds: "Water holds part of the carbonyl as hydrate and drives the imine back.",
   consumed: "The imine is in equilibrium with amine and water: the apparent constant falls by the free share.",
   source: "Cordes and Jencks, J. Am. Chem. Soc. 1962, 84, 832; recalled",
+  constant: {
+    aldehyde: { value: 2.5, low: 1, high: 3.5 },
+    ketone: { value: 0, low: -1.5, high: 1 },
+    partners: ["primary amine", "ammonia", "secondary amine"],
+    releasesWater: true,
+    source:
+      "Cordes and Jencks, J. Am. Chem. Soc. 1962, 84, 832, and later work on aliphatic imines in water; recalled with a wide bound",
+  },
   words: ["imine", "schiff base", "enamine"],
   sees: ({ has }) => has("primary amine") || has("ammonia") || has("secondary amine"),
 };

@@ -1,6 +1,7 @@
 /** What a step does, as far as it decides what a bound share means for the charge. */
 
 import type { ReagentTag } from "../../compounds/tags.ts";
+import type { Interval } from "../../model/contract.ts";
 
 /** The cases of what a bound share does to a charge. */
 export type Consequence =
@@ -27,6 +28,17 @@ export interface StepFacts {
   readonly alone: boolean;
 }
 
+/** How far an equilibrium step goes: log10 of its constant for the free carbonyl in water, L/mol, over usual compounds. */
+export interface StepConstant {
+  readonly aldehyde: Interval;
+  readonly ketone: Interval;
+  /** The partner, by its tags. */
+  readonly partners: readonly ReagentTag[];
+  /** Water is a product, so that less of it drives the step. */
+  readonly releasesWater: boolean;
+  readonly source: string;
+}
+
 export interface StepKind {
   /** As a directive names it. */
   readonly id: string;
@@ -36,6 +48,7 @@ export interface StepKind {
   readonly binds: string;
   readonly consumed: string;
   readonly source: string;
+  readonly constant?: StepConstant;
   /** Words of a title that name it, in small letters. */
   readonly words: readonly string[];
   /** Whether what was charged shows it. */

@@ -1,0 +1,54 @@
+/** How much conversion an equilibrium step loses because part of the carbonyl compound is bound. */
+
+import type { CarbonylView } from "./types.ts";
+
+export interface ConversionLoss {
+  /** Conversion of the smaller partner for the middle constant, were nothing bound, and as it is. */
+  readonly without: number;
+  readonly bound: number;
+  /** The greatest loss over the range of constants. */
+  readonly most: number;
+}
+
+/** Water activity below which a step that releases water is not driven any further by taking water away. */
+const DRIEST = 0.02;
+
+/**
+ * Share of the smaller of `a` and `b` (mol/L) that an addition with constant K (L/mol) turns over.
+ * The smaller root of x = K (a − x)(b − x), written so that nothing cancels.
+ */
+export function additionConversion(constant: number, a: number, b: number): number {
+  const least = Math.min(a, b);
+  if (!(least > 0) || !(constant > 0)) return 0;
+  const sum = a + b + 1 / constant;
+  const root = Math.sqrt(Math.max(0, sum * sum - 4 * a * b));
+  return Math.min(1, (2 * a * b) / (sum + root) / least);
+}
+
+/** @returns undefined when the kind of step has no constant, or amounts do not follow from the note */
+export function conversionLoss(view: CarbonylView): ConversionLoss | undefined {
+  const { step, charge, moment, forms } = view;
+  const constant = step.decision.kind?.constant;
+  const litres = moment.speciation.volumeL;
+  if (!constant || !charge.total || !(litres > 0) || moment.volumeStated === false) return undefined;
+  const partner = step.charges
+    .filter(
+      ({ charge: index, compound }) =>
+        index !== charge.charge && compound.tags.some((tag) => constant.partners.includes(tag)),
+    )
+    .reduce((sum, row) => sum + (row.total?.value ?? 0), 0);
+  if (!(partner > 0)) return undefined;
+  const aldehyde = charge.compound.carbonyl?.sites.some((site) => site.hydrogens > 0);
+  const range = aldehyde ? constant.aldehyde : constant.ketone;
+  const water = Math.max(DRIEST, moment.speciation.activities.water ?? 1);
+  const shift = constant.releasesWater ? -Math.log10(water) : 0;
+  const [a, b] = [charge.total.value / litres, partner / litres];
+  const free = Math.max(forms.free.value, Number.MIN_VALUE);
+  const at = (log10: number) => {
+    const full = 10 ** (log10 + shift);
+    return { without: additionConversion(full, a, b), bound: additionConversion(full * free, a, b) };
+  };
+  const middle = at(range.value);
+  const losses = [range.low, range.value, range.high].map(at).map(({ without, bound }) => without - bound);
+  return { ...middle, most: Math.max(...losses) };
+}
