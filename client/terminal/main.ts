@@ -44,9 +44,21 @@ function oneOf<T extends string>(option: string, value: string, allowed: readonl
   return found;
 }
 
+/** "--at -20" means minus twenty: a value that begins with a dash and a digit is joined to its option. */
+function joinNegative(argv: readonly string[]): string[] {
+  const joined: string[] = [];
+  for (const argument of argv) {
+    const option = joined.at(-1);
+    if (/^-\d/.test(argument) && option !== undefined && /^--[a-zA-Z]+$/.test(option))
+      joined[joined.length - 1] = `${option}=${argument}`;
+    else joined.push(argument);
+  }
+  return joined;
+}
+
 function parse(argv: readonly string[]) {
   try {
-    return parseArgs({ args: [...argv], options: OPTIONS, allowPositionals: true });
+    return parseArgs({ args: joinNegative(argv), options: OPTIONS, allowPositionals: true });
   } catch (error) {
     throw new UsageError(error instanceof Error ? error.message : "the call cannot be read");
   }
