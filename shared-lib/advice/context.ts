@@ -12,9 +12,6 @@ export function contextOf(input: AdviceInput): AdviceContext {
   const charges = grouped(input.timeline.charges, (charge) => charge.step);
   const moments = grouped(input.moments, (moment) => moment.step);
   const events = grouped(input.reading.events, (event) => event.step);
-  const unread = new Set(
-    input.reading.charges.flatMap(({ step, mention }) => (input.reading.mentions[mention]?.compound ? [] : [step])),
-  );
   const titles = new Map(input.reading.steps.map((step) => [step.number, step]));
   const steps = [...charges.keys()].map((number): StepView => {
     const own = charges.get(number) ?? [];
@@ -22,7 +19,12 @@ export function contextOf(input: AdviceInput): AdviceContext {
     const decisive = decisiveMoment(states);
     const step = titles.get(number);
     const equivalent = equivalentOfStep(own, writtenEquivalents(input, own));
-    const decision = decideStepKind(step, factsOf(own, decisive), input.reading.directives, unread.has(number));
+    const decision = decideStepKind(
+      step,
+      factsOf(own, decisive),
+      input.reading.directives,
+      step ? input.text.slice(step.start, step.end) : "",
+    );
     return {
       number,
       ...(step?.title ? { title: step.title } : {}),

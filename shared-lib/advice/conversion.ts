@@ -1,5 +1,6 @@
 /** How much conversion an equilibrium step loses because part of the carbonyl compound is bound. */
 
+import type { FormKind } from "../model/contract.ts";
 import type { CarbonylView } from "./types.ts";
 
 export interface ConversionLoss {
@@ -25,6 +26,20 @@ export function additionConversion(constant: number, a: number, b: number): numb
   return Math.min(1, (2 * a * b) / (sum + root) / least);
 }
 
+/** Kinds of form that a partner makes, not the medium. */
+const OF_PARTNERS: ReadonlySet<FormKind> = new Set<FormKind>(["iminium or imine", "other"]);
+
+/** Share of what the partners have not taken. */
+export function ownShare({ forms }: CarbonylView): number {
+  const taken = forms.forms.reduce((sum, form) => (OF_PARTNERS.has(form.kind) ? sum + form.fraction.value : sum), 0);
+  return Math.max(1e-9, 1 - taken);
+}
+
+/** Free share of what the partners have not taken. */
+export function ownFree(view: CarbonylView): number {
+  return Math.min(1, Math.max(view.forms.free.value / ownShare(view), Number.MIN_VALUE));
+}
+
 /** @returns undefined when the kind of step has no constant, or amounts do not follow from the note */
 export function conversionLoss(view: CarbonylView): ConversionLoss | undefined {
   const { step, charge, moment, forms } = view;
@@ -38,17 +53,19 @@ export function conversionLoss(view: CarbonylView): ConversionLoss | undefined {
     )
     .reduce((sum, row) => sum + (row.total?.value ?? 0), 0);
   if (!(partner > 0)) return undefined;
-  const aldehyde = charge.compound.carbonyl?.sites.some((site) => site.hydrogens > 0);
-  const range = aldehyde ? constant.aldehyde : constant.ketone;
+  const hydration = forms.sites.map((site) => site.hydration.log10.value);
+  if (hydration.length === 0) return undefined;
   const water = Math.max(DRIEST, moment.speciation.activities.water ?? 1);
-  const shift = constant.releasesWater ? -Math.log10(water) : 0;
+  const dried = constant.releasesWater ? -Math.log10(water) : 0;
+  const shift = constant.slope * Math.max(...hydration) + dried;
   const [a, b] = [charge.total.value / litres, partner / litres];
-  const free = Math.max(forms.free.value, Number.MIN_VALUE);
+  const free = ownFree(view);
   const at = (log10: number) => {
     const full = 10 ** (log10 + shift);
     return { without: additionConversion(full, a, b), bound: additionConversion(full * free, a, b) };
   };
-  const middle = at(range.value);
-  const losses = [range.low, range.value, range.high].map(at).map(({ without, bound }) => without - bound);
+  const { low, value, high } = constant.atUnitHydration;
+  const middle = at(value);
+  const losses = [low, value, high].map(at).map(({ without, bound }) => without - bound);
   return { ...middle, most: Math.max(...losses) };
 }

@@ -96,8 +96,14 @@ export function agrees(a: number, b: number, rounding: number, tolerance = TOLER
 }
 
 /** The writer counts molecules of a dimer or trimer, not of what they give. */
-export function countedWhole({ holds, meant, rounding }: Weighing, { form }: ResolvedCharge): boolean {
-  return form?.kind === "oligomer" && [2, 3].some((units) => agrees(holds / units, meant, rounding, ASSAY_TOLERANCE));
+export function countedWhole(context: AdviceContext, weighing: Weighing, { form, compound }: ResolvedCharge): boolean {
+  const forms = form ? [form] : (context.lexicon?.formsOf(compound.id) ?? []);
+  const { massG, meant, rounding } = weighing;
+  return forms.some(
+    ({ kind, massPerMole }) =>
+      kind === "oligomer" &&
+      [2, 3].some((units) => agrees(massG / massPerMole / units, meant, rounding, ASSAY_TOLERANCE)),
+  );
 }
 
 /**
@@ -105,11 +111,11 @@ export function countedWhole({ holds, meant, rounding }: Weighing, { form }: Res
  *
  * @returns g per mol that the writer reckoned with, or undefined
  */
-export function weighedAs(weighing: Weighing, charge: ResolvedCharge): number | undefined {
+export function weighedAs(context: AdviceContext, weighing: Weighing, charge: ResolvedCharge): number | undefined {
   const { form, compound } = charge;
   if (!form || form.kind === "neat") return undefined;
   if (agrees(weighing.holds, weighing.meant, weighing.rounding, ASSAY_TOLERANCE)) return undefined;
-  if (countedWhole(weighing, charge)) return undefined;
+  if (countedWhole(context, weighing, charge)) return undefined;
   const reckoned = [compound.molarMass, form.massPerMole];
   return reckoned.find((grams) => agrees(weighing.massG / grams, weighing.meant, weighing.rounding, 0.03));
 }

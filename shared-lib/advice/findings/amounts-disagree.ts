@@ -15,34 +15,43 @@ interface Slip {
   readonly says: string;
 }
 
+const POWERS_OF_1000 = [1000, 1e-3, 1e6, 1e-6];
+/** A decimal sign in the wrong place; of a carbonyl compound only, because more than the name must be read right for it. */
+const POWERS_OF_10 = [10, 0.1];
+
 /** The likely slip behind a weighing that does not fit its amount. */
-function slipOf(context: AdviceContext, step: StepView, charge: ResolvedCharge, weighing: Weighing): Slip | undefined {
-  const { meant, holds, massG, rounding } = weighing;
+function slipOf(context: AdviceContext, charge: ResolvedCharge, weighing: Weighing): Slip | undefined {
+  const { meant, holds, massG, rounding, gramsPerMole } = weighing;
   const fits = (mol: number) => agrees(mol, meant, rounding, 0.02);
-  if ([1000, 1e-3, 1e6, 1e-6].some((factor) => fits(holds * factor)))
-    return { says: "a factor of 1000 between the units" };
+  if (POWERS_OF_1000.some((factor) => fits(holds * factor))) return { says: "a factor of 1000 between the units" };
   const { compound, form } = charge;
+  if (!compound.carbonyl) return undefined;
+  if (POWERS_OF_10.some((factor) => fits(holds * factor))) return { says: "a decimal sign in the wrong place" };
   const perMole = form?.massPerMole ?? compound.molarMass;
-  if (!agrees(perMole, weighing.gramsPerMole, 0, 0.01) && fits(massG / perMole)) return { says: "the assay left out" };
-  if (weighing.by.of === "volume" && fits((weighing.by.base * 1000) / perMole)) {
+  const hasAssay = !agrees(perMole, gramsPerMole, 0, 0.01);
+  if (hasAssay && fits(massG / perMole)) return { says: "the assay left out" };
+  if (weighing.by.of === "volume" && [perMole, gramsPerMole].some((grams) => fits((weighing.by.base * 1000) / grams))) {
     return { says: "the density left out (millilitres taken as grams)" };
   }
   const other = context.lexicon
     ?.formsOf(compound.id)
-    .find((candidate) => candidate.id !== form?.id && fits(massG / candidate.massPerMole));
-  if (other && !agrees(other.massPerMole, perMole, 0, 0.02)) return { says: `the molar mass of ${other.label}` };
-  const swapped = step.charges.find((row) => row.charge !== charge.charge && fits(massG / row.compound.molarMass));
-  return swapped ? { says: `the molar mass of ${swapped.compound.name}` } : undefined;
+    .find(
+      ({ id, massPerMole }) => id !== form?.id && !agrees(massPerMole, perMole, 0, 0.02) && fits(massG / massPerMole),
+    );
+  return other ? { says: `the molar mass of ${other.label}` } : undefined;
 }
 
 function lookAtWeighing(context: AdviceContext, step: StepView, charge: ResolvedCharge): readonly RawFinding[] {
   const mention = context.reading.mentions[charge.mention];
   const weighing = weighingOf(context, step, charge);
-  if (!mention || !weighing || weighing.meantBy !== "amount") return [];
+  if (mention?.role !== "reagent" || !weighing || weighing.meantBy !== "amount") return [];
   if (agrees(weighing.holds, weighing.meant, weighing.rounding, EXPLAINED)) return [];
-  if (countedWhole(weighing, charge) || (charge.compound.carbonyl && weighedAs(weighing, charge) !== undefined))
+  if (
+    countedWhole(context, weighing, charge) ||
+    (charge.compound.carbonyl && weighedAs(context, weighing, charge) !== undefined)
+  )
     return [];
-  const slip = slipOf(context, step, charge, weighing);
+  const slip = slipOf(context, charge, weighing);
   if (!slip && !speaksWithoutSlip(charge, weighing)) return [];
   const because = slip ? `; the likely slip is ${slip.says}` : "";
   const needed = massText(weighing.meant * weighing.gramsPerMole);
@@ -51,10 +60,13 @@ function lookAtWeighing(context: AdviceContext, step: StepView, charge: Resolved
   return [{ start: mention.start, end: mention.end, mention: charge.mention, message, fixes }];
 }
 
-/** A structure read from a name may be the misreading itself; only catalogue compounds without a usual salt or hydrate count. */
-function speaksWithoutSlip(charge: ResolvedCharge, weighing: Weighing): boolean {
-  if (!charge.compound.carbonyl || charge.compound.origin !== "catalogue" || charge.formIs === "assumed") return false;
-  return !agrees(weighing.holds, weighing.meant, weighing.rounding, UNEXPLAINED);
+/**
+ * Too little mass for the amount. Too much says nothing: a salt, a hydrate or a longer name than was read would explain it.
+ * A structure read from a name may be the misreading itself, so only compounds of the catalogue count.
+ */
+function speaksWithoutSlip({ compound, formIs }: ResolvedCharge, { holds, meant, rounding }: Weighing): boolean {
+  if (!compound.carbonyl || compound.solvent || compound.origin !== "catalogue" || formIs === "assumed") return false;
+  return holds < meant && !agrees(holds, meant, rounding, UNEXPLAINED);
 }
 
 function fixesOf(context: AdviceContext, weighing: Weighing, needed: string): readonly SafeFix[] {
@@ -106,10 +118,11 @@ export const amountsDisagree: FindingRule = {
   severity: "note",
   title: "Mass, volume, amount and equivalents of one charge do not agree",
   page: `**Looks for** a charge whose mass or volume gives another amount than the one written, or whose amount gives other equivalents than written,
-and names the likely slip: a factor of 1000, the assay or the density left out, the molar mass of another form or of another charge.
+and names the likely slip: a factor of 1000, a decimal sign, the assay or the density left out, the molar mass of another form.
 
-**Keeps silent** within 10 % and what the written digits allow; for ranges and approximate figures; without an explaining slip, for
-compounds that are not carbonyl compounds of the catalogue (a salt, a hydrate or a misread name would explain it) and within 20 %.
+**Keeps silent** within 10 % and what the written digits allow; for ranges and approximate figures; when the amount counts whole dimers or trimers;
+for other compounds than aldehydes and ketones, unless it is a factor of 1000. Without a slip that explains it, it speaks only if the mass
+is more than 20 % too small: a salt, a hydrate or a longer name than was read would explain too much mass.
 
 **Corrections** are offered only where a slip explains the difference: keep the amount and weigh accordingly, or keep what is weighed.
 

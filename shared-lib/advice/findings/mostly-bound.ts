@@ -1,6 +1,7 @@
 /** Common to the findings that say how most of a carbonyl compound is bound. */
 
 import type { FormKind, Interval } from "../../model/contract.ts";
+import { ownFree } from "../conversion.ts";
 import { percentWithBounds } from "../figures.ts";
 import { writtenBeside } from "../fixes/beside.ts";
 import type { AdviceContext, CarbonylView, RawFinding } from "../types.ts";
@@ -20,16 +21,17 @@ export function shareOf(view: CarbonylView, kinds: readonly FormKind[]): Interva
   return { value, low: Math.min(low, value), high: Math.min(1, high) };
 }
 
+/** The lower bound of the share must be at least this part of the share that the settings ask for. */
+const LEAST_SURE = 0.5;
+
 const FAMILIES: readonly (readonly FormKind[])[] = [
   ["hydrate", "hydrate anion"],
   ["hemiacetal"],
   ["cyclic hemiacetal"],
   ["oligomer"],
-  ["iminium or imine"],
-  ["other"],
 ];
 
-/** The family of bound forms that holds most. */
+/** The family of forms made by the medium or the molecule itself that holds most. */
 function largestFamily(view: CarbonylView): readonly FormKind[] | undefined {
   let largest: readonly FormKind[] | undefined;
   let most = 0;
@@ -55,9 +57,14 @@ export function lookForBound(
   return context.carbonyls.flatMap((view) => {
     const { forms, charge, mention } = view;
     if (forms.outside !== undefined || forms.forms.length === 0 || !concerns(view)) return [];
-    if (1 - forms.free.value < context.settings.boundShare) return [];
+    if (1 - ownFree(view) < context.settings.boundShare) return [];
     const family = largestFamily(view);
-    if (!family?.includes(kind) || writtenBeside(context.text, view)) return [];
+    if (
+      !family?.includes(kind) ||
+      shareOf(view, family).low < context.settings.boundShare * LEAST_SURE ||
+      writtenBeside(context.text, view)
+    )
+      return [];
     const said = consequenceOf(context, view);
     if (!said) return [];
     const share = percentWithBounds(shareOf(view, family));

@@ -11,7 +11,8 @@ export const mostlyHemiacetal: FindingRule = {
 an alcohol in the flask.
 
 **Keeps silent** when nothing would be changed: the step takes free carbonyl irreversibly and the free share is above 10 %; the
-alcohol is the partner (acetal formation); the forms are already written beside the charge; no estimate is given.
+alcohol is the partner (acetal formation); the forms are already written beside the charge; no estimate is given, or its bounds
+are too wide to say so.
 
 **Why.** Alcohols add to the carbonyl group as water does, primary ones more strongly.
 

@@ -10,7 +10,8 @@ export const mostlyHydrated: FindingRule = {
   page: `**Looks for** a carbonyl charge that is bound to at least the share in the settings (half, by default), mostly as hydrate.
 
 **Keeps silent** when nothing would be changed: the step takes free carbonyl irreversibly and the free share is above 10 %;
-the hydrate is what reacts; the alcohol is the partner; the forms are already written beside the charge; no estimate is given.
+the hydrate is what reacts; the alcohol is the partner; the forms are already written beside the charge; no estimate is given, or its bounds
+are too wide to say so.
 
 **Why.** Water adds to the carbonyl group within seconds to hours. What is bound does not take part in an equilibrium step, so
 conversion falls by the free share; in an irreversible step only the rate does.

@@ -1,6 +1,6 @@
 /** An oligomer is charged under conditions in which it does not give the free compound. */
 
-import { percent, timeText } from "../figures.ts";
+import { timeText } from "../figures.ts";
 import { holdAfterSentence } from "../fixes/hold.ts";
 import type { AdviceContext, CarbonylView, FindingRule, RawFinding } from "../types.ts";
 
@@ -44,7 +44,7 @@ function lookAt(context: AdviceContext, view: CarbonylView): readonly RawFinding
   const hold =
     form.release === "slow" && event ? holdAfterSentence(context.text, event.end, SLOW_RELEASE_S) : undefined;
   const fixes = hold ? [{ title: `Add a hold of ${timeText(SLOW_RELEASE_S)}`, edits: [hold], safe: false }] : [];
-  const message = `${form.label} ${lacks}: up to ${percent(1)} of the ${charge.compound.name} is still bound in it.`;
+  const message = `${form.label} ${lacks}: most of the ${charge.compound.name} may still be bound in it.`;
   return [{ start: mention.start, end: mention.end, mention: charge.mention, message, fixes }];
 }
 

@@ -1,7 +1,7 @@
 /** What a bound share means for a charge, in words, and what may be done about it. */
 
 import type { Severity } from "../../model/contract.ts";
-import { conversionLoss } from "../conversion.ts";
+import { conversionLoss, ownFree } from "../conversion.ts";
 import { percent, trimmed } from "../figures.ts";
 import { besideEdit } from "../fixes/beside.ts";
 import { HOW_MUCH, scaleCharge } from "../fixes/scale-charge.ts";
@@ -30,7 +30,7 @@ const KEEP = "more equivalents or less of what binds it keep the conversion";
  */
 export function consequenceOf(context: AdviceContext, view: CarbonylView): SaidConsequence | undefined {
   const { kind } = view.step.decision;
-  const free = view.forms.free.value;
+  const free = ownFree(view);
   const rate = `the rate falls to ${percent(free)} of that without binding`;
   const title = kind?.title ?? "";
   if (context.settings.basis === "free") {
@@ -38,8 +38,8 @@ export function consequenceOf(context: AdviceContext, view: CarbonylView): SaidC
   }
   if (!kind) {
     return {
-      severity: "note",
-      says: `If the step uses it up irreversibly, ${REFILLED}, and ${rate}; if the step is an equilibrium, ${KEEP}`,
+      severity: boughtBound(view) ? "hint" : "note",
+      says: `If the step uses it up irreversibly, equivalents stand and ${rate}; if it is an equilibrium, ${KEEP}`,
       mayRaise: true,
     };
   }
@@ -63,6 +63,11 @@ export function consequenceOf(context: AdviceContext, view: CarbonylView): SaidC
   }
 }
 
+/** Bought as hydrate, hemiacetal, oligomer or in water: it was bound before, and its users know. */
+function boughtBound({ charge }: CarbonylView): boolean {
+  return charge.form !== undefined && charge.form.kind !== "neat";
+}
+
 /** An equilibrium far on the side of the product loses nothing that matters; then nothing needs saying. */
 function ofEquilibrium(view: CarbonylView, title: string): SaidConsequence | undefined {
   const loss = conversionLoss(view);
@@ -77,7 +82,7 @@ function ofEquilibrium(view: CarbonylView, title: string): SaidConsequence | und
 export function fixesForBound(context: AdviceContext, view: CarbonylView, mayRaise: boolean): readonly SafeFix[] {
   const { text } = context;
   const fixes: SafeFix[] = [];
-  const times = 1 / view.forms.free.value;
+  const times = 1 / ownFree(view);
   if (mayRaise && times <= MOST_TIMES) {
     const edits = scaleCharge(text, view.written, HOW_MUCH, times);
     if (edits) {
@@ -97,7 +102,7 @@ function remedy(view: CarbonylView): string {
 
 /** Said instead of a larger charge that would be absurd. */
 export function insteadOfRaising(view: CarbonylView, mayRaise: boolean): string {
-  const times = 1 / view.forms.free.value;
+  const times = 1 / ownFree(view);
   if (!mayRaise || times <= MOST_TIMES) return "";
   return ` A larger charge does not help (${times > 1000 ? "over 1000" : trimmed(times, 2)} times as much): ${remedy(view)}.`;
 }

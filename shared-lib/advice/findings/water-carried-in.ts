@@ -19,7 +19,7 @@ function isDry(form: SuppliedForm): boolean {
 function lookAt(context: AdviceContext, view: CarbonylView): readonly RawFinding[] {
   const partners = sensitivePartners(view.step.charges);
   const partner = partners[0];
-  if (!partner) return [];
+  if (!partner || view.charge.form?.kind === "polymer") return [];
   const carried = view.charge.brings.filter(({ solvent }) => solventByKey(solvent)?.nucleophile !== "none");
   const mol = carried.reduce((sum, row) => sum + row.amount, 0);
   const reagent = partner.total?.value;
@@ -39,7 +39,7 @@ export const waterCarriedIn: FindingRule = {
   page: `**Looks for** an organometallic reagent, a strong hydride or an ylide in the same step as a carbonyl charge that is a hydrate, a hemiacetal or a
 solution in water or alcohol, and counts what it brings against the partner.
 
-**Keeps silent** below 0.05 equivalents of the partner, in steps whose partner stands water, and on water that a work-up adds.
+**Keeps silent** on the few per cent of water in paraformaldehyde, below 0.05 equivalents of the partner, in steps whose partner stands water, and on water that a work-up adds.
 
 **Why.** Each mol of O-H uses up one mol of such a reagent before it adds. Such a quench can be violent: the safety data sheet, local
 rules and trained staff decide how it is done.

@@ -13,16 +13,16 @@ function lookAt(context: AdviceContext, step: StepView, charge: ResolvedCharge):
   const { form, compound, formIs } = charge;
   const mention = context.reading.mentions[charge.mention];
   const weighing = weighingOf(context, step, charge);
-  if (!form || !mention || !weighing || weighedAs(weighing, charge) === undefined) return [];
+  if (!form || !mention || !weighing || weighedAs(context, weighing, charge) === undefined) return [];
   const needed = weighing.meant * weighing.gramsPerMole;
   const density = form.density;
   const needs = weighing.by.of === "volume" && density ? volumeText(needed / density / 1000) : massText(needed);
   const name = form.label === compound.name ? `the ${form.kind}` : form.label;
-  const what =
+  const [holds, meant] = [amountText(weighing.holds), amountText(weighing.meant)];
+  const message =
     formIs === "written"
-      ? `of ${name} hold`
-      : `hold that only as the free compound; as ${name}, the usual form, they hold`;
-  const message = `${weighing.by.text} ${what} ${amountText(weighing.holds)} of ${compound.name}, not ${amountText(weighing.meant)}: that takes ${needs}.`;
+      ? `${weighing.by.text} of ${name} holds ${holds} of ${compound.name}, not ${meant}: that takes ${needs}.`
+      : `${weighing.by.text} is ${meant} only as pure ${compound.name}; as ${name}, the usual form, it holds ${holds}: ${meant} takes ${needs}.`;
   const severity: Severity = formIs === "written" && !form.source.startsWith(NO_SOURCE) ? "warning" : "note";
   const fixes = fixesOf(context, weighing, needs, formIs);
   return [{ start: mention.start, end: mention.end, mention: charge.mention, severity, message, fixes }];

@@ -8,6 +8,6 @@ export const bioconjugation: StepKind = {
   binds: "Water holds the carbonyl as hydrate; an amine buffer takes part of it.",
   consumed: "Nothing is consumed yet: the free concentration is what the next partner will meet.",
   source: "common practice, no source",
-  words: ["conjugation", "labelling", "labeling"],
+  words: ["stock", "standard", "made up", "conjugation", "labelling", "labeling"],
   sees: ({ buffered, alone }) => buffered && alone,
 };

@@ -9,12 +9,12 @@ export const bisulfiteAdduct: StepKind = {
   consumed: "Bisulfite adds reversibly: the hydrate lowers the apparent constant by the free share.",
   source: "Olson and Hoffmann, Atmos. Environ. 1989, 23, 985; recalled",
   constant: {
-    aldehyde: { value: 5, low: 3.4, high: 6.5 },
-    ketone: { value: 2.4, low: 1.5, high: 3.5 },
+    atUnitHydration: { value: 5.8, low: 5, high: 6.6 },
+    slope: 1,
     partners: ["bisulfite"],
     releasesWater: false,
     source:
-      "Betterton, Erel and Hoffmann, Environ. Sci. Technol. 1988, 22, 92: acetaldehyde 6.9e5, glycolaldehyde 2.0e6; benzaldehyde 6.2e3 (method of Kokesh and Hall); ketones recalled",
+      "Betterton, Erel and Hoffmann, Environ. Sci. Technol. 1988, 22, 92: acetaldehyde 6.9e5, glycolaldehyde 2.0e6, linear in Taft's constants; benzaldehyde 6.2e3 (method of Kokesh and Hall) gives the slope",
   },
   words: ["bisulfite", "bisulphite"],
   sees: ({ has }) => has("bisulfite"),

@@ -9,12 +9,12 @@ export const cyanohydrin: StepKind = {
   consumed: "Cyanide adds reversibly: the hydrate lowers the conversion by its share.",
   source: "Ching and Kallen, J. Am. Chem. Soc. 1978, 100, 6119; recalled",
   constant: {
-    aldehyde: { value: 3.5, low: 2.3, high: 5 },
-    ketone: { value: 1.2, low: 0.5, high: 2 },
+    atUnitHydration: { value: 4.3, low: 3.3, high: 5.3 },
+    slope: 1,
     partners: ["cyanide"],
     releasesWater: false,
     source:
-      "Ching and Kallen, J. Am. Chem. Soc. 1978, 100, 6119: benzaldehyde about 2.4e2; aliphatic aldehydes and ketones recalled with a wide bound",
+      "Ching and Kallen, J. Am. Chem. Soc. 1978, 100, 6119: benzaldehyde about 2.4e2 (recalled); slope as for other additions",
   },
   words: ["cyanohydrin"],
   sees: ({ has }) => has("cyanide"),

@@ -35,18 +35,21 @@ export function factsOf(charges: readonly ResolvedCharge[], decisive: SpeciatedM
 }
 
 /**
- * @param unread some charge of the step has no structure: then nobody can say that the carbonyl stands alone
+ * @param text of the step: that nothing is consumed has to be said in words, for an unknown partner leaves no trace
  */
 export function decideStepKind(
   step: Step | undefined,
   facts: StepFacts,
   directives: readonly Directive[],
-  unread: boolean,
+  text: string,
 ): StepKindDecision {
   const said = directives.findLast((directive) => directive.word === STEP_DIRECTIVE && step && covers(directive, step));
   const named = said && STEP_KINDS.find((kind) => kind.id === said.argument.trim().toLowerCase());
   if (named) return { kind: named, by: "directive" };
-  const seen = STEP_KINDS.find((kind) => kind.sees(facts) && !(unread && restsOnAbsence(kind)));
+  const words = text.toLowerCase();
+  const seen = STEP_KINDS.find(
+    (kind) => kind.sees(facts) && (!restsOnAbsence(kind) || kind.words.some((word) => holdsWord(words, word))),
+  );
   if (seen && !restsOnAbsence(seen)) return { kind: seen, by: "partners" };
   const title = step?.title?.toLowerCase();
   const titled = title ? STEP_KINDS.find((kind) => kind.words.some((word) => holdsWord(title, word))) : undefined;

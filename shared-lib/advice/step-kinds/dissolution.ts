@@ -8,6 +8,6 @@ export const dissolution: StepKind = {
   binds: "Water, alcohol or the compound's own hydroxyl holds the carbonyl.",
   consumed: "Nothing is consumed: the free concentration is what the next partner will meet.",
   source: "common practice, no source",
-  words: ["stock solution", "dissolution"],
+  words: ["stock", "standard", "made up", "dissolution", "solubility"],
   sees: ({ alone }) => alone,
 };

@@ -9,12 +9,12 @@ export const imine: StepKind = {
   consumed: "The imine is in equilibrium with amine and water: the apparent constant falls by the free share.",
   source: "Cordes and Jencks, J. Am. Chem. Soc. 1962, 84, 832; recalled",
   constant: {
-    aldehyde: { value: 2.5, low: 1, high: 3.5 },
-    ketone: { value: 0, low: -1.5, high: 1 },
+    atUnitHydration: { value: 2, low: 0.5, high: 3.5 },
+    slope: 0.7,
     partners: ["primary amine", "ammonia", "secondary amine"],
     releasesWater: true,
     source:
-      "Cordes and Jencks, J. Am. Chem. Soc. 1962, 84, 832, and later work on aliphatic imines in water; recalled with a wide bound",
+      "Jencks, Prog. Phys. Org. Chem. 1964, 2, 63, and later work on aliphatic imines in water (recalled, with a wide bound)",
   },
   words: ["imine", "schiff base", "enamine"],
   sees: ({ has }) => has("primary amine") || has("ammonia") || has("secondary amine"),

@@ -9,12 +9,11 @@ export const oxime: StepKind = {
   consumed: "The oxime is in equilibrium with them, far on its side: the apparent constant falls by the free share.",
   source: "Jencks, J. Am. Chem. Soc. 1959, 81, 475; Jencks, Prog. Phys. Org. Chem. 1964, 2, 63; recalled",
   constant: {
-    aldehyde: { value: 8, low: 6, high: 10 },
-    ketone: { value: 6, low: 4.5, high: 7.5 },
+    atUnitHydration: { value: 7.5, low: 6, high: 9 },
+    slope: 0.5,
     partners: ["hydroxylamine"],
     releasesWater: true,
-    source:
-      "Jencks, Prog. Phys. Org. Chem. 1964, 2, 63: acetone about 1e6; aldehydes higher; recalled with a wide bound",
+    source: "Jencks, Prog. Phys. Org. Chem. 1964, 2, 63: acetone about 1e6 (recalled, with a wide bound)",
   },
   words: ["oxime"],
   sees: ({ has }) => has("hydroxylamine"),

@@ -11,5 +11,5 @@ export const reductiveAmination: StepKind = {
     "Borch, Bernstein and Durst, J. Am. Chem. Soc. 1971, 93, 2897; Abdel-Magid et al., J. Org. Chem. 1996, 61, 3849; recalled",
   words: ["reductive amination", "reductive alkylation"],
   sees: ({ has }) =>
-    (has("primary amine") || has("secondary amine") || has("ammonia")) && (has("mild hydride") || has("borohydride")),
+    has("mild hydride") || (has("borohydride") && (has("primary amine") || has("secondary amine") || has("ammonia"))),
 };

@@ -28,10 +28,14 @@ export interface StepFacts {
   readonly alone: boolean;
 }
 
-/** How far an equilibrium step goes: log10 of its constant for the free carbonyl in water, L/mol, over usual compounds. */
+/**
+ * How far an equilibrium step goes in water: log10 K (L/mol, free carbonyl) = atUnitHydration + slope · log10 K_h.
+ * Additions to C=O run parallel to hydration (slope about 1), condensations to C=N less so.
+ */
 export interface StepConstant {
-  readonly aldehyde: Interval;
-  readonly ketone: Interval;
+  /** For a compound with K_h = 1, over usual partners. */
+  readonly atUnitHydration: Interval;
+  readonly slope: number;
   /** The partner, by its tags. */
   readonly partners: readonly ReagentTag[];
   /** Water is a product, so that less of it drives the step. */
