@@ -1,12 +1,14 @@
 /** Findings and hints of a note. */
 
 import type { Severity } from "../model/contract.ts";
+import type { Settings } from "../model/settings.ts";
 import type { Directive } from "../notes/types.ts";
 import { contextOf } from "./context.ts";
 import { FINDINGS } from "./findings/list.ts";
 import { hintsOf } from "./hints.ts";
 import type { AdviceInput, Finding, Hint } from "./types.ts";
 
+const BASIS_DIRECTIVE = "basis";
 const SILENCE_DIRECTIVE = "silence";
 
 /**
@@ -15,7 +17,7 @@ const SILENCE_DIRECTIVE = "silence";
  * @returns findings in the order of the text, and hints; what the settings or a directive silence is left out
  */
 export function advise(input: AdviceInput): { readonly findings: readonly Finding[]; readonly hints: readonly Hint[] } {
-  const context = contextOf(input);
+  const context = contextOf({ ...input, settings: { ...input.settings, basis: basisOf(input) } });
   const silences = input.reading.directives.filter((directive) => directive.word === SILENCE_DIRECTIVE);
   const findings = FINDINGS.flatMap((rule) =>
     rule.look(context).flatMap((raw): Finding[] => {
@@ -26,6 +28,12 @@ export function advise(input: AdviceInput): { readonly findings: readonly Findin
     }),
   );
   return { findings: findings.toSorted((a, b) => a.start - b.start || a.end - b.end), hints: hintsOf(context) };
+}
+
+/** The note's own directive wins over the settings. */
+function basisOf({ reading, settings }: AdviceInput): Settings["basis"] {
+  const said = reading.directives.findLast(({ word }) => word === BASIS_DIRECTIVE)?.argument.trim();
+  return said === "free" || said === "charged" ? said : settings.basis;
 }
 
 function severityOf(

@@ -4,16 +4,18 @@ import type { Interval } from "../../model/contract.ts";
 import { amountText, massText, trimmed, volumeText } from "../figures.ts";
 import type { LedgerRow, StepLedger } from "./types.ts";
 
-const HEADINGS = ["Charge", "Weighed as", "Mass", "Volume", "Amount", "Equiv", "Free equiv", "Brings"];
+/** Column headings of a ledger. */
+export const ledgerHeadings = ["Charge", "Weighed as", "Mass", "Volume", "Amount", "Equiv", "Free equiv", "Brings"];
 
 /** The table and the lines below it, without a final line break. */
 export function ledgerMarkdown(ledger: StepLedger): string {
-  const rows = ledger.rows.map((row) => `| ${cellsOf(row).map(escaped).join(" | ")} |`);
-  const table = [`| ${HEADINGS.join(" | ")} |`, `| ${HEADINGS.map(() => "---").join(" | ")} |`, ...rows];
+  const rows = ledger.rows.map((row) => `| ${ledgerCells(row).map(escaped).join(" | ")} |`);
+  const table = [`| ${ledgerHeadings.join(" | ")} |`, `| ${ledgerHeadings.map(() => "---").join(" | ")} |`, ...rows];
   return [...table, "", ...linesBelow(ledger)].join("\n");
 }
 
-function cellsOf(row: LedgerRow): readonly string[] {
+/** One row as plain text, a cell for each heading. */
+export function ledgerCells(row: LedgerRow): readonly string[] {
   const assay = row.assay === undefined || row.assay === 1 ? "" : `${trimmed(row.assay * 100, 3)} wt%`;
   const form = [
     row.form ?? "",
@@ -43,7 +45,8 @@ function bounded({ value, low, high }: Interval): string {
   return least === most ? `${mid}` : `${mid} (${least} to ${most})`;
 }
 
-function linesBelow(ledger: StepLedger): readonly string[] {
+/** What a ledger says below its table, plain text. */
+export function linesBelow(ledger: StepLedger): readonly string[] {
   const lines: string[] = [];
   if (ledger.equivalentMol !== undefined) {
     const by = ledger.countedBy === "written" ? "as written" : "the smallest charge";
