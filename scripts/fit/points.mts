@@ -2,8 +2,7 @@
 
 import { createStructureToolkit } from "../../shared-lib/compounds/structure.ts";
 import { inChargeState } from "../../shared-lib/equilibrium/constants/correlate.ts";
-import { measuredCompounds } from "../../shared-lib/equilibrium/constants/measured.ts";
-import { hydrationEnthalpy, vantHoff } from "../../shared-lib/equilibrium/constants/temperature.ts";
+import { measuredConstant, measuredParents } from "../../shared-lib/equilibrium/constants/measured.ts";
 import { extraVariance, type Family, familyOf, featuresOf } from "../../shared-lib/equilibrium/constants/terms.ts";
 import type { ChargeState } from "../../shared-lib/equilibrium/constants/types.ts";
 
@@ -22,29 +21,30 @@ export interface Point {
 
 const toolkit = createStructureToolkit();
 
-function pointOf(compound: ReturnType<typeof measuredCompounds>[number], state: ChargeState): Point | undefined {
-  const reading = toolkit.read(compound.smiles);
+function pointOf(smiles: string, state: ChargeState): Point | undefined {
+  const reading = toolkit.read(smiles);
   if (!reading.ok || !reading.carbonyl) return undefined;
   const like = reading.carbonyl.sites.filter((site) => site.leading);
   const written = like[0];
   if (!written || written.class === "beta-dicarbonyl") return undefined;
+  const found = measuredConstant(smiles, written.class, state);
+  if (!found) return undefined;
   const site = inChargeState(written, state);
-  const change = vantHoff(hydrationEnthalpy(site.class), compound.celsius + 273.15, 298.15);
   return {
-    smiles: compound.smiles,
+    smiles,
     state,
     siteClass: site.class,
     family: familyOf(site),
     x: featuresOf(site),
     // A published constant counts every like site; the correlation speaks of one.
-    y: compound.log10 + change.shift - Math.log10(like.length),
-    variance: compound.sd ** 2 + change.sd ** 2 + extraVariance(site),
-    external: compound.values.some((value) => value.external),
+    y: found.log10 - Math.log10(like.length),
+    variance: found.sd ** 2 + extraVariance(site),
+    external: found.values.some((value) => value.external),
   };
 }
 
 /** Every compound and state with a measured value in use. */
 export function fitPoints(): readonly Point[] {
   const states: readonly ChargeState[] = ["neutral", "anion", "cation"];
-  return states.flatMap((state) => measuredCompounds(state).flatMap((compound) => pointOf(compound, state) ?? []));
+  return states.flatMap((state) => measuredParents(state).flatMap((smiles) => pointOf(smiles, state) ?? []));
 }

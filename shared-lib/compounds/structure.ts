@@ -127,7 +127,9 @@ interface Parent {
  * The compound that published constants are filed under: uncharged, without stereo and isotope labels, without counterions.
  * `undefined` for a SMILES of several different carbonyl compounds.
  */
-function parentOf(molecule: Molecule): Parent | undefined {
+function parentOf(molecule: Molecule, canonical: string): Parent | undefined {
+  // Nothing to take off: the common case, and canonising is the costly step.
+  if (!/[.@[/\\]/.test(canonical)) return { smiles: canonical, cation: false };
   const parents = new Set<string>();
   let cation = false;
   for (const fragment of molecule.getFragments()) {
@@ -167,11 +169,14 @@ function isLike(a: PerceivedSite, b: PerceivedSite | undefined): boolean {
   return b !== undefined && a.hydrogens === b.hydrogens && a.acyl === b.acyl && a.class === b.class;
 }
 
-function carbonylOf(molecule: Molecule): Pick<StructureReading & { ok: true }, "carbonyl" | "outside"> {
+function carbonylOf(
+  molecule: Molecule,
+  canonical: string,
+): Pick<StructureReading & { ok: true }, "carbonyl" | "outside"> {
   const graph = graphOf(molecule);
   const seen = perceive(graph);
   if (seen.outside !== undefined) return { outside: seen.outside };
-  const parent = parentOf(molecule);
+  const parent = parentOf(molecule, canonical);
   if (parent === undefined) return { outside: "it holds two different carbonyl compounds: write one at a time" };
   // Of a salt with two like ions, one stands for both.
   const fragment = fragmentOf(graph, seen.sites[0]?.atom ?? 0);
@@ -202,7 +207,7 @@ function read(smiles: string): StructureReading {
     };
     const metal = complexMetal(molecule);
     if (metal) return { ...known, outside: `it holds ${metal}: the model knows no metal complexes` };
-    return { ...known, ...carbonylOf(molecule) };
+    return { ...known, ...carbonylOf(molecule, known.canonicalSmiles) };
   } catch (error) {
     return { ok: false, problem: `the structure cannot be worked out: ${firstMessage(error)}` };
   }

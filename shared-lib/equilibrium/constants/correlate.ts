@@ -59,7 +59,7 @@ function termsIn(x: readonly number[]): string {
     if (value === 0) return [];
     return [value === 1 ? `${beta.toFixed(2)} (${name})` : `${beta.toFixed(2)} × ${value.toFixed(2)} (${name})`];
   });
-  return parts.join(" + ").replaceAll("+ -", "− ").replaceAll("-", "−");
+  return parts.join(" + ").replaceAll("+ -", "− ").replace(/^-/, "−").replaceAll(" × -", " × −");
 }
 
 /**
