@@ -52,9 +52,18 @@ export function scaledQuantity(text: string, quantity: Quantity, factor: number)
   const written = text.slice(start, end);
   const writing = readWriting(written, quantity.value);
   if (!writing) return undefined;
-  const [whole = "", fraction] = trimmed(writing.value * factor, Math.max(LEAST_DIGITS, writing.digits)).split(".");
+  const [whole = "", fraction] = plainFigure(writing, writing.value * factor).split(".");
   const grouped = writing.thousands === "" ? whole : groupsOfThree(whole, writing.thousands);
   return { start, end, text: fraction === undefined ? grouped : `${grouped}${writing.point}${fraction}` };
+}
+
+/** A comma with three digits behind it would be read as thousands: one digit more tells them apart. */
+function plainFigure(writing: Writing, value: number): string {
+  const digits = Math.max(LEAST_DIGITS, writing.digits);
+  const figure = trimmed(value, digits);
+  const [whole = "", fraction = ""] = figure.split(".");
+  const ambiguous = writing.point === "," && fraction.length === 3 && whole !== "0" && whole.length <= 3;
+  return ambiguous ? trimmed(value, digits + 1) : figure;
 }
 
 function groupsOfThree(whole: string, sign: string): string {
