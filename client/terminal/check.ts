@@ -1,101 +1,111 @@
 /** `oxomargin check`: reads notes and says what is bound and what to change. */
 
-import { readFile } from "node:fs/promises";
-import { FINDINGS } from "../../shared-lib/advice/findings/list.ts";
-import type { FileReport, Severity } from "../../shared-lib/model/contract.ts";
-import { toFileReport } from "../../shared-lib/report/file-report.ts";
-import { reportAsHtml } from "../../shared-lib/report/html.ts";
-import { reportAsMarkdown } from "../../shared-lib/report/markdown.ts";
-import { toSarif } from "../../shared-lib/report/sarif.ts";
-import { toCheckReport } from "../../shared-lib/report/summary.ts";
-import { fileAsText } from "../../shared-lib/report/text.ts";
-import { Engine } from "./engine.ts";
+import type { Severity } from "../../shared-lib/model/contract.ts";
+import { type ReportFormat, WRITERS } from "../../shared-lib/report/formats.ts";
+import { addSummary } from "../../shared-lib/report/summary.ts";
+import type { ReportWriter } from "../../shared-lib/report/writer.ts";
+import { type CheckedPiece, checkText, SEVERITY_RANK } from "./check-file.ts";
+import { checkFiles, threadsFor } from "./check-files.ts";
 import { findNotes } from "./find-notes.ts";
+import { timeLeft } from "./progress.ts";
+import { textOfBytes } from "./read-text.ts";
 import { readAll, type Streams } from "./streams.ts";
 import { UsageError } from "./usage-error.ts";
-import { VERSION } from "./version.ts";
-
-export const CHECK_FORMATS = ["text", "json", "ndjson", "sarif", "markdown", "html"] as const;
-export type CheckFormat = (typeof CHECK_FORMATS)[number];
-export const FAIL_ON = ["never", "hint", "note", "warning"] as const;
+import { TABLES_VERSION, VERSION } from "./version.ts";
 
 export interface CheckCall {
+  readonly format: ReportFormat;
+  readonly failOn: Severity | "never";
+}
+
+export interface CheckPathsCall extends CheckCall {
   readonly paths: readonly string[];
-  readonly stdinName?: string;
-  readonly format: CheckFormat;
-  readonly failOn: (typeof FAIL_ON)[number];
+  readonly jobs?: number;
+  readonly cache?: string;
+  /** Address of the bundle's entry module. */
+  readonly entry: string;
 }
 
-const RANK: Readonly<Record<Severity, number>> = { hint: 1, note: 2, warning: 3 };
+const VERSIONS = { program: VERSION, tables: TABLES_VERSION };
 
-/** True when a finding stands at or above the severity that fails. */
-export function fails(reports: readonly FileReport[], failOn: CheckCall["failOn"]): boolean {
-  if (failOn === "never") return false;
-  return reports.some((report) => report.findings.some((finding) => RANK[finding.severity] >= RANK[failOn]));
-}
+/** Puts pieces into one report on standard output, and remembers what decides the exit status. */
+class ReportOut {
+  readonly #writer: ReportWriter;
+  readonly #streams: Streams;
+  readonly #summary: Record<string, number> = {};
+  #written = false;
+  worst = 0;
 
-interface ReadNoteFile {
-  readonly report: FileReport;
-  readonly text: string;
-}
-
-async function* readNotes(call: CheckCall, engine: Engine, streams: Streams): AsyncGenerator<ReadNoteFile> {
-  if (call.stdinName !== undefined) {
-    const text = await readAll(streams.input);
-    yield { text, report: toFileReport(call.stdinName, await engine.analyze(text, call.stdinName)) };
-    return;
+  constructor(format: ReportFormat, streams: Streams) {
+    this.#writer = WRITERS[format];
+    this.#streams = streams;
   }
-  for await (const file of findNotes(call.paths, streams.warn)) {
-    let text: string;
-    try {
-      text = await readFile(file, "utf8");
-    } catch (error) {
-      streams.warn(`${file}: cannot be read (${(error as NodeJS.ErrnoException).code ?? "unknown"}); left out`);
-      continue;
+
+  async begin(): Promise<void> {
+    await this.#print(this.#writer.begin(VERSIONS));
+  }
+
+  async add({ piece, summary, worst }: CheckedPiece): Promise<void> {
+    addSummary(this.#summary, summary);
+    this.worst = Math.max(this.worst, worst);
+    if (piece === "") return;
+    await this.#print(this.#written ? `${this.#writer.between}${piece}` : piece);
+    this.#written = true;
+  }
+
+  async end(): Promise<void> {
+    await this.#print(this.#writer.end(this.#summary, VERSIONS));
+  }
+
+  async #print(text: string): Promise<void> {
+    if (text !== "") await this.#streams.print(text);
+  }
+}
+
+function statusOf(worst: number, failOn: CheckCall["failOn"]): number {
+  return failOn !== "never" && worst >= SEVERITY_RANK[failOn] ? 1 : 0;
+}
+
+/** Checks the note on standard input. @returns exit status @throws UsageError when it is no text */
+export async function checkStdin(name: string, call: CheckCall, streams: Streams): Promise<number> {
+  const read = textOfBytes(await readAll(streams.input));
+  if (!read.ok) throw new UsageError(`${name}: ${read.problem}`);
+  const out = new ReportOut(call.format, streams);
+  await out.begin();
+  await out.add(await checkText(read.text, name, call.format));
+  await out.end();
+  return statusOf(out.worst, call.failOn);
+}
+
+/**
+ * Checks files and folders. A note that cannot be used is named on standard error and left out; the rest is reported.
+ *
+ * @returns exit status 0, 1, or 2 when something was left out
+ * @throws UsageError for a path that does not exist
+ */
+export async function checkPaths(call: CheckPathsCall, streams: Streams): Promise<number> {
+  const found = await findNotes(call.paths, streams.warn);
+  if (found.files.length === 0) streams.warn("no notes (.md, .markdown, .txt) were found");
+  let leftOut = found.leftOut > 0;
+  const tasks = found.files.map((file) => ({
+    file,
+    format: call.format,
+    ...(call.cache === undefined ? {} : { cache: call.cache }),
+  }));
+  const out = new ReportOut(call.format, streams);
+  await out.begin();
+  const left = timeLeft(tasks.length);
+  let done = 0;
+  for await (const checked of checkFiles(tasks, threadsFor(tasks.length, call.jobs), call.entry)) {
+    const file = tasks[done++]?.file;
+    if (checked.ok) await out.add(checked);
+    else {
+      streams.warn(`${file}: left out: ${checked.problem}`);
+      leftOut = true;
     }
-    yield { text, report: toFileReport(file, await engine.analyze(text, file)) };
+    streams.progress(() => left(done));
   }
-}
-
-function render(format: CheckFormat, notes: readonly ReadNoteFile[]): string {
-  switch (format) {
-    case "json":
-      return `${JSON.stringify(
-        toCheckReport(
-          notes.map((note) => note.report),
-          VERSION,
-        ),
-      )}\n`;
-    case "sarif":
-      return `${JSON.stringify(toSarif(notes, FINDINGS, VERSION))}\n`;
-    case "markdown":
-      return reportAsMarkdown(notes, VERSION);
-    case "html":
-      return reportAsHtml(notes, VERSION);
-    case "ndjson":
-    case "text":
-      return "";
-  }
-}
-
-/** Runs the check. @returns exit status 0 or 1 @throws UsageError for input that cannot be used */
-export async function check(call: CheckCall, streams: Streams): Promise<number> {
-  if (call.paths.length === 0 && call.stdinName === undefined)
-    throw new UsageError("check needs a file or folder, --stdin or --records");
-  const engine = new Engine();
-  const kept: ReadNoteFile[] = [];
-  let failed = false;
-  let count = 0;
-  for await (const note of readNotes(call, engine, streams)) {
-    count++;
-    failed ||= fails([note.report], call.failOn);
-    if (call.format === "ndjson") await streams.print(`${JSON.stringify(note.report)}\n`);
-    else if (call.format === "text") await streams.print(fileAsText(note.report, note.text));
-    else kept.push(note);
-    streams.progress(`${count} notes`);
-  }
-  if (count === 0) streams.warn("no notes (.md, .markdown, .txt) were found");
-  const whole = render(call.format, kept);
-  if (whole !== "") await streams.print(whole);
-  return failed ? 1 : 0;
+  streams.progress(undefined);
+  await out.end();
+  return leftOut ? 2 : statusOf(out.worst, call.failOn);
 }

@@ -15,7 +15,7 @@ export class Engine {
     return this.#structures;
   }
 
-  /** Analysis of a note by the format that its name says. */
+  /** Analysis of a note in the format that the end of its name says: Markdown, or plain text for any other. */
   async analyze(text: string, name: string): Promise<Analysis> {
     const format = /\.(?:md|markdown)$/i.test(name) ? "markdown" : "plain";
     const options = { format, lexicon: this.lexicon } as const;

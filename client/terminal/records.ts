@@ -12,19 +12,25 @@ function recordOf(line: string): { id: unknown; text: string } | { id: unknown; 
   } catch {
     return { id: null, error: 'the line is no JSON: write {"id": …, "text": …}' };
   }
-  if (typeof value !== "object" || value === null)
+  if (typeof value !== "object" || value === null || Array.isArray(value))
     return { id: null, error: 'the line is no object: write {"id": …, "text": …}' };
   const { id = null, text } = value as { id?: unknown; text?: unknown };
+  if (id !== null && typeof id !== "string" && typeof id !== "number")
+    return { id: null, error: '"id" must be a string or a number' };
   return typeof text === "string" ? { id, text } : { id, error: '"text" must be a string' };
+}
+
+/** Records are read as Markdown, in which plain paragraphs read the same; an id that ends in .txt says plain text. */
+function nameOf(id: unknown): string {
+  return typeof id === "string" && /\.txt$/i.test(id) ? id : "record.md";
 }
 
 async function answer(line: string, engine: Engine): Promise<object> {
   const record = recordOf(line);
   if ("error" in record) return record;
   try {
-    // Records are Markdown: plain paragraphs read the same in it.
-    const analysis = await engine.analyze(record.text, "record.md");
-    return { ...toFileReport(String(record.id), analysis), id: record.id };
+    const analysis = await engine.analyze(record.text, nameOf(record.id));
+    return { id: record.id, ...toFileReport(record.id === null ? "" : String(record.id), analysis) };
   } catch (error) {
     return { id: record.id, error: error instanceof Error ? error.message : "the record could not be read" };
   }
@@ -33,9 +39,7 @@ async function answer(line: string, engine: Engine): Promise<object> {
 /** Filters standard input to standard output. @returns exit status 0 */
 export async function checkRecords(streams: Streams): Promise<number> {
   const engine = new Engine();
-  for await (const line of createInterface({ input: streams.input, crlfDelay: Number.POSITIVE_INFINITY })) {
-    if (line.trim() === "") continue;
+  for await (const line of createInterface({ input: streams.input, crlfDelay: Number.POSITIVE_INFINITY }))
     await streams.print(`${JSON.stringify(await answer(line, engine))}\n`);
-  }
   return 0;
 }

@@ -1,3 +1,8 @@
-/** Version of the program, put in when it is bundled. */
-declare const OXOMARGIN_VERSION: string | undefined;
-export const VERSION: string = typeof OXOMARGIN_VERSION === "string" ? OXOMARGIN_VERSION : "0.0.0-source";
+/** Versions of the program and of the tables it computes from. */
+
+import { version } from "../../package.json";
+import { tables } from "../../shared-lib/generated/tables-version.json";
+
+export const VERSION: string = version;
+/** Changes with any row of any table. */
+export const TABLES_VERSION: string = tables;

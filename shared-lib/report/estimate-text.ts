@@ -1,7 +1,8 @@
 /** An estimate as the terminal shows it. */
 
+import { percentWithBounds } from "../advice/figures.ts";
 import type { Estimate } from "../model/contract.ts";
-import { boundedPercent, duration } from "./figures.ts";
+import { duration } from "./card/share-words.ts";
 
 /** Text of an estimate: forms with bounds, then how they were reached. */
 export function estimateAsText(estimate: Estimate): string {
@@ -12,7 +13,7 @@ export function estimateAsText(estimate: Estimate): string {
   ];
   if (estimate.outside !== undefined) return `${[...lines, `No estimate: ${estimate.outside}.`].join("\n")}\n`;
   lines.push("");
-  for (const form of estimate.forms) lines.push(`  ${form.label.padEnd(34)} ${boundedPercent(form.fraction)}`);
+  for (const form of estimate.forms) lines.push(`  ${form.label.padEnd(34)} ${percentWithBounds(form.fraction)}`);
   if (estimate.time)
     lines.push(
       `  half-life of the approach to equilibrium: ${duration(estimate.time.halfLife.value)} (${duration(estimate.time.halfLife.low)} to ${duration(estimate.time.halfLife.high)}), from the ${estimate.time.basis}`,

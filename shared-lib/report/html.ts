@@ -1,74 +1,93 @@
 /** The report as one printable page: no script, nothing from a network, figures as inline SVG; every text is escaped. */
 
-import type { FileReport } from "../model/contract.ts";
-import { boundedPercent, percent } from "./figures.ts";
-import { lineStartsOf, placeOf } from "./line-table.ts";
+import { amountText, percentWithBounds } from "../advice/figures.ts";
+import { barOf, hatchings, patchOf } from "./bar.ts";
+import { escapeHtml } from "./escape-html.ts";
+import { ledgerTable } from "./ledger-table.ts";
+import { chargeInWords, kindInWords, placesOf, stepName } from "./rows.ts";
+import type { CarbonylReport, NoteOnFile, StepReport } from "./types.ts";
+import type { ReportWriter } from "./writer.ts";
 
-/** Text inside HTML, attributes included. */
-export function escapeHtml(text: string): string {
-  return text.replace(
-    /[&<>"']/g,
-    (c) => ({ "&": "&amp;", "<": "&lt;", ">": "&gt;", '"': "&quot;", "'": "&#39;" })[c] as string,
+const STYLE = `body{font:15px/1.5 system-ui,sans-serif;max-width:64rem;margin:2rem auto;padding:0 1rem;color:#1b1b1b;background:#fff}
+h1{font-size:1.6rem}h2{font-size:1.25rem;border-top:2px solid #24464d;padding-top:.6rem;margin-top:2rem;overflow-wrap:anywhere}h3{font-size:1.05rem}
+table{border-collapse:collapse;width:100%;margin:.6rem 0}th,td{text-align:left;vertical-align:top;padding:.3rem .6rem;border-bottom:1px solid #c8c8c8}
+caption{text-align:left;font-weight:600;padding:.4rem 0}ul{padding-left:1.2rem}.forms{list-style:none;padding:0;margin:.3rem 0}
+.warning{font-weight:600}.method{font-size:.9em;color:#333}code{font-size:.9em}tr,li{break-inside:avoid}@media print{body{margin:0;max-width:none}}`;
+
+const cell = (text: string): string => `<td>${escapeHtml(text)}</td>`;
+const heading = (text: string): string => `<th scope="col">${escapeHtml(text)}</th>`;
+
+function table(caption: string, headings: readonly string[], rows: readonly string[]): string {
+  return `<table><caption>${escapeHtml(caption)}</caption><thead><tr>${headings.map(heading).join("")}</tr></thead><tbody>${rows.join("")}</tbody></table>`;
+}
+
+function formsCell(carbonyl: CarbonylReport): string {
+  if (carbonyl.outside !== undefined) return cell(`not estimated: ${carbonyl.outside}`);
+  const rows = carbonyl.forms
+    .filter((form) => form.fraction.value >= 0.005)
+    .map((form) => `<li>${patchOf(form.kind)} ${escapeHtml(`${percentWithBounds(form.fraction)} ${form.label}`)}</li>`);
+  const free = carbonyl.freeAmount ? `<li>free: ${escapeHtml(amountText(carbonyl.freeAmount.value))}</li>` : "";
+  return `<td>${barOf(carbonyl.forms)}<ul class="forms">${rows.join("")}${free}</ul></td>`;
+}
+
+function methodOf(note: NoteOnFile, carbonyl: CarbonylReport): string {
+  const name = note.report.mentions[carbonyl.mention]?.name ?? "";
+  const lines = carbonyl.derivation.map(
+    ({ says, value, source }) => `${says}${value ? `: ${value}` : ""}${source ? ` [${source}]` : ""}`,
   );
+  const items = [...lines, ...carbonyl.cautions.map((caution) => `Caution: ${caution}`)];
+  return `<div class="method"><strong>${escapeHtml(name)}</strong><ol>${items.map((line) => `<li>${escapeHtml(line)}</li>`).join("")}</ol></div>`;
 }
 
-const STYLE = `body{font:15px/1.5 system-ui,sans-serif;max-width:60rem;margin:2rem auto;padding:0 1rem;color:#1b1b1b;background:#fff}
-table{border-collapse:collapse;width:100%}th,td{text-align:left;vertical-align:top;padding:.3rem .6rem;border-bottom:1px solid #c8c8c8}
-caption{text-align:left;font-weight:600;padding:.4rem 0}code{font-size:.9em}section{break-inside:avoid-page}@media print{body{margin:0}}`;
-
-const BAR = 220;
-
-/** Shares as a bar; the pattern, not only the shade, tells the forms apart, and the table beside it says the same in words. */
-function bar(forms: FileReport["flask"][number]["carbonyls"][number]["forms"]): string {
-  let x = 0;
-  const parts = forms.map((form, i) => {
-    const width = form.fraction.value * BAR;
-    const part = `<rect x="${x.toFixed(1)}" width="${width.toFixed(1)}" height="12" fill="${form.kind === "free carbonyl" ? "#fff" : `rgb(${90 + 30 * i},${110 + 25 * i},${120 + 20 * i})`}" stroke="#333" stroke-width="0.7"/>`;
-    x += width;
-    return part;
+function stepAsHtml(note: NoteOnFile, step: StepReport, lineOf: (offset: number) => number): string {
+  if (step.carbonyls.length === 0) return "";
+  const rows = step.carbonyls.map((carbonyl) => {
+    const mention = note.report.mentions[carbonyl.mention];
+    const form = note.report.charges[carbonyl.charge]?.suppliedForm ?? "as named";
+    return `<tr>${cell(String(lineOf(mention?.start ?? 0)))}${cell(mention?.text ?? "")}${cell(chargeInWords(note, carbonyl))}${cell(form)}${formsCell(carbonyl)}</tr>`;
   });
-  const label = forms.map((form) => `${form.kind} ${percent(form.fraction.value)} %`).join(", ");
-  return `<svg role="img" aria-label="${escapeHtml(label)}" width="${BAR}" height="12">${parts.join("")}</svg>`;
-}
-
-function fileAsHtml(file: FileReport, text: string): string {
-  const starts = lineStartsOf(text);
-  const rows = file.charges.flatMap((charge) => {
-    const mention = file.mentions[charge.mention];
-    if (!mention?.carbonyl) return [];
-    const last = file.flask
-      .flatMap((moment) => moment.carbonyls.filter((carbonyl) => carbonyl.mention === charge.mention))
-      .at(-1);
-    const amounts = charge.amounts.map((amount) => text.slice(amount.start, amount.end)).join(", ");
-    const forms = last
-      ? `${bar(last.forms)}<br>${last.forms
-          .filter((form) => form.fraction.value > 0.005)
-          .map((form) => `${form.kind} ${boundedPercent(form.fraction)}`)
-          .join("<br>")}`
-      : "not assessed";
-    return [
-      `<tr><td>${placeOf(starts, mention.start).line}</td><td>${escapeHtml(mention.text)}</td><td>${escapeHtml(amounts)}</td><td>${escapeHtml(charge.suppliedForm ?? "as named")}</td><td>${forms}</td></tr>`,
-    ];
-  });
-  const table =
-    rows.length > 0
-      ? `<table><caption>Charges and their forms (central 95 %)</caption><thead><tr><th scope="col">line</th><th scope="col">reagent</th><th scope="col">charged</th><th scope="col">supplied form</th><th scope="col">in the flask</th></tr></thead><tbody>${rows.join("")}</tbody></table>`
-      : "";
-  const findings = file.findings.map(
-    (finding) =>
-      `<li>line ${placeOf(starts, finding.start).line}, ${finding.severity}: ${escapeHtml(finding.message)} <code>${escapeHtml(finding.code)}</code></li>`,
+  const forms = table(
+    "Charges and their forms (central 95 %)",
+    ["line", "reagent", "charged", "supplied form", "in the flask"],
+    rows,
   );
-  return `<section><h2>${escapeHtml(file.path)}</h2>${table}${findings.length > 0 ? `<ul>${findings.join("")}</ul>` : "<p>Nothing to change.</p>"}</section>`;
+  const ledger = ledgerTable(step.ledger);
+  const ledgerRows = ledger.rows.map((row) => `<tr>${row.map(cell).join("")}</tr>`);
+  const below = ledger.below.map((line) => `<p>${escapeHtml(line)}</p>`);
+  const kind = kindInWords(step);
+  return [
+    `<h3>${escapeHtml(stepName(step))}</h3><p>${escapeHtml(`${kind.charAt(0).toUpperCase()}${kind.slice(1)}.`)}</p>`,
+    forms,
+    ledger.rows.length > 0 ? table("Ledger", ledger.headings, ledgerRows) + below.join("") : "",
+    `<h4>How the figures were reached</h4>${step.carbonyls.map((carbonyl) => methodOf(note, carbonyl)).join("")}`,
+  ].join("\n");
 }
 
-/** The whole page. */
-export function reportAsHtml(
-  files: readonly { readonly report: FileReport; readonly text: string }[],
-  version: string,
-): string {
-  return `<!doctype html>
-<html lang="en"><head><meta charset="utf-8"><meta http-equiv="Content-Security-Policy" content="default-src 'none'; style-src 'unsafe-inline'"><title>Carbonyl forms in the flask</title><style>${STYLE}</style></head>
-<body><h1>Carbonyl forms in the flask</h1>${files.map(({ report, text }) => fileAsHtml(report, text)).join("\n")}
-<footer><p>Oxomargin ${escapeHtml(version)}. Estimates with central 95 % bounds; they replace neither analysis nor local rules and trained staff.</p></footer></body></html>
-`;
+/** A section of one note. */
+export function fileAsHtml(note: NoteOnFile): string {
+  const { report, text } = note;
+  const placeOf = placesOf(text);
+  const lineOf = (offset: number): number => placeOf(offset).line;
+  const findings = report.findings.map((finding) => {
+    const titles = finding.fixes.map((fix) => fix.title).join("; ");
+    return `<li><span class="${finding.severity}">line ${lineOf(finding.start)}, ${finding.severity}:</span> ${escapeHtml(finding.message)}${titles === "" ? "" : ` Correction: ${escapeHtml(titles)}.`} <code>${escapeHtml(finding.code)}</code></li>`;
+  });
+  const steps = (report.steps ?? []).map((step) => stepAsHtml(note, step, lineOf)).join("\n");
+  const changes =
+    findings.length > 0
+      ? `<h3>What to change or to know</h3><ul>${findings.join("\n")}</ul>`
+      : "<p>Nothing to change.</p>";
+  return `<section><h2>${escapeHtml(report.path)}</h2>${steps}${changes}</section>`;
 }
+
+export const HTML_WRITER: ReportWriter = {
+  withSteps: true,
+  begin: () => `<!doctype html>
+<html lang="en"><head><meta charset="utf-8"><meta name="viewport" content="width=device-width"><meta http-equiv="Content-Security-Policy" content="default-src 'none'; style-src 'unsafe-inline'"><title>Carbonyl forms in the flask</title><style>${STYLE}</style></head>
+<body>${hatchings()}<main><h1>Carbonyl forms in the flask</h1>
+`,
+  note: fileAsHtml,
+  between: "\n",
+  end: (summary, { program, tables }) =>
+    `</main><footer><p>Notes ${summary.files ?? 0}, carbonyl charges ${summary.carbonylCharges ?? 0}, findings ${summary.findings ?? 0}.</p><p>Oxomargin ${escapeHtml(program)}, tables ${escapeHtml(tables)}. Estimates with central 95 % bounds; they do not replace analysis, the safety data sheet, local rules and trained staff.</p></footer></body></html>\n`,
+};

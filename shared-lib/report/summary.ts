@@ -1,22 +1,20 @@
 /** Counts over files: notes read, carbonyl charges, findings by code. */
 
-import type { CheckReport, FileReport } from "../model/contract.ts";
+import type { FileReport } from "../model/contract.ts";
 
-/** Adds one file to the counts. */
-export function addToSummary(summary: Record<string, number>, file: FileReport): void {
-  const add = (key: string, by: number): void => {
-    summary[key] = (summary[key] ?? 0) + by;
+/** Counts of one file. */
+export function summaryOf(file: FileReport): Record<string, number> {
+  const summary: Record<string, number> = {
+    files: 1,
+    mentions: file.mentions.length,
+    carbonylCharges: file.charges.filter((charge) => file.mentions[charge.mention]?.carbonyl).length,
+    findings: file.findings.length,
   };
-  add("files", 1);
-  add("mentions", file.mentions.length);
-  add("carbonylCharges", file.charges.filter((charge) => file.mentions[charge.mention]?.carbonyl).length);
-  add("findings", file.findings.length);
-  for (const finding of file.findings) add(finding.code, 1);
+  for (const { code } of file.findings) summary[code] = (summary[code] ?? 0) + 1;
+  return summary;
 }
 
-/** The whole report. */
-export function toCheckReport(files: readonly FileReport[], version: string): CheckReport {
-  const summary: Record<string, number> = {};
-  for (const file of files) addToSummary(summary, file);
-  return { schema: 1, tool: { name: "oxomargin", version }, files, summary };
+/** Adds counts to a sum. */
+export function addSummary(sum: Record<string, number>, counts: Readonly<Record<string, number>>): void {
+  for (const [key, count] of Object.entries(counts)) sum[key] = (sum[key] ?? 0) + count;
 }

@@ -119,9 +119,11 @@ function conditionsOf(moment: SpeciatedMoment): string {
   return `${medium}, ${temperature}${acidity}.`;
 }
 
-/** Lines with a source come first: they carry the figure. */
+/** Lines with a source come first: they carry the figure. Several sources of one thing count as one reason. */
 function mainReasons(derivation: readonly DerivationLine[]): readonly DerivationLine[] {
-  const sourced = derivation.filter((line) => line.source !== undefined);
-  const rest = derivation.filter((line) => line.source === undefined);
+  const said = new Set<string>();
+  const distinct = derivation.filter((line) => !said.has(line.says) && said.add(line.says));
+  const sourced = distinct.filter((line) => line.source !== undefined);
+  const rest = distinct.filter((line) => line.source === undefined);
   return [...sourced, ...rest].slice(0, MOST_REASONS);
 }
