@@ -1,7 +1,7 @@
 /** Activities of the solvents of a mixture (pure liquid = 1): between 0 and 1, and never falling while a nucleophile's share rises. */
 
 import type { Component, Composition } from "./composition.ts";
-import { isModelled, type LiquidModel, liquidModel, lnGammasOf } from "./liquid-model.ts";
+import { GRID, isModelled, type LiquidModel, liquidModel, lnGammasOf } from "./liquid-model.ts";
 
 export interface Activities {
   /** By key of the solvents table. */
@@ -16,9 +16,9 @@ export interface Activities {
 /** The parameters were fitted from about 0 °C; the ends are what the pages promise. */
 const COLDEST_K = 253.15;
 const HOTTEST_K = 373.15;
-const RAY_STEPS = 24;
-
 interface Shares {
+  /** Mole fraction of all modelled components together: what is left is taken as an ideal diluent. */
+  readonly total: number;
   readonly x: Float64Array;
   readonly phi: Float64Array;
 }
@@ -37,7 +37,7 @@ function sharesOf(components: readonly Component[]): Shares {
     x[i] = component.moleFraction / moles;
     phi[i] = component.volumeFraction / volume;
   });
-  return { x, phi };
+  return { total: moles, x, phi };
 }
 
 /** Activity of component `i` when its mole fraction is `u` and the others keep their proportions. */
@@ -59,18 +59,16 @@ function alongRay(model: LiquidModel, shares: Shares, i: number, u: number): num
 const GOLDEN = (Math.sqrt(5) - 1) / 2;
 const GOLDEN_STEPS = 10;
 
-/** Extreme of an activity within a grid step of `at`, by golden section: `sign` 1 for the highest, −1 for the lowest. */
-function extremeNear(
+/** Extreme of an activity between two mole fractions, by golden section: `sign` 1 for the highest, −1 for the lowest. */
+function extremeBetween(
   model: LiquidModel,
   shares: Shares,
   i: number,
-  at: number,
   ends: readonly [number, number],
   sign: 1 | -1,
 ): number {
   const height = (u: number): number => sign * alongRay(model, shares, i, u);
-  let low = Math.max(ends[0], at - 1 / RAY_STEPS);
-  let high = Math.min(ends[1], at + 1 / RAY_STEPS);
+  let [low, high] = ends;
   let first = high - GOLDEN * (high - low);
   let second = low + GOLDEN * (high - low);
   let a = height(first);
@@ -101,22 +99,27 @@ function extremeNear(
 function levelled(model: LiquidModel, shares: Shares, i: number, here: number): number {
   const x = shares.x[i] as number;
   let highest = here;
-  let highestAt = x;
+  let highestAt = -1;
   let lowest = here;
-  let lowestAt = x;
-  for (let step = 1; step < RAY_STEPS; step++) {
-    const u = step / RAY_STEPS;
+  let lowestAt = -1;
+  GRID.forEach((u, k) => {
     const value = alongRay(model, shares, i, u);
     if (u < x && value > highest) {
       highest = value;
-      highestAt = u;
+      highestAt = k;
     } else if (u > x && value < lowest) {
       lowest = value;
-      lowestAt = u;
+      lowestAt = k;
     }
+  });
+  if (highestAt >= 0 && highest < 1) {
+    const ends = [GRID[highestAt - 1] ?? 1e-9, Math.min(x, GRID[highestAt + 1] ?? x)] as const;
+    highest = Math.max(highest, extremeBetween(model, shares, i, ends, 1));
   }
-  if (highestAt !== x) highest = Math.max(highest, extremeNear(model, shares, i, highestAt, [1e-9, x], 1));
-  if (lowestAt !== x) lowest = Math.min(lowest, extremeNear(model, shares, i, lowestAt, [x, 1 - 1e-9], -1));
+  if (lowestAt >= 0 && lowest < 1) {
+    const ends = [Math.max(x, GRID[lowestAt - 1] ?? x), GRID[lowestAt + 1] ?? 1 - 1e-9] as const;
+    lowest = Math.min(lowest, extremeBetween(model, shares, i, ends, -1));
+  }
   return (Math.min(1, highest) + Math.min(1, lowest)) / 2;
 }
 
@@ -149,9 +152,9 @@ function compute(composition: Composition, temperatureK: number): Activities {
     const lnGamma = lnGammasOf(model, shares.x, shares.phi);
     const partly = modelled.some((component) => !component.solvent.miscible && component.moleFraction > 0);
     modelled.forEach((component, i) => {
-      const raw = component.moleFraction * Math.exp(lnGamma[i] as number);
-      const held = model.gap[i] ? levelled(model, shares, i, raw) : raw;
-      activity[component.solvent.key] = Math.min(1, held);
+      const raw = (shares.x[i] as number) * Math.exp(lnGamma[i] as number);
+      const held = model.gap && component.solvent.nucleophile !== "none" ? levelled(model, shares, i, raw) : raw;
+      activity[component.solvent.key] = Math.min(1, shares.total * Math.min(1, held));
       if (raw > 1 && partly) twoPhases = true;
       else if (raw > 1 || Math.abs(held - raw) > 0.005)
         flags.push(`${component.solvent.name} is near a miscibility limit of this mixture`);

@@ -10,11 +10,20 @@ export interface LiquidModel {
   readonly water: number;
   /** What ln γ of water gains in each solvent, dry, so that a = x/x_sat there; undefined where nothing is to mend. */
   readonly wetting?: readonly number[];
-  /** Whether the activity of a component rises and falls again when it is added to the others: the model sees a miscibility gap. */
-  readonly gap: readonly boolean[];
+  /** Two of the components split: an activity may rise, fall and rise again as its share grows. */
+  readonly gap: boolean;
 }
 
-const GAP_STEPS = 20;
+/** Where a gap is looked for: closer together near the pure liquids, where the limits of sparing solubility lie. */
+export const GRID: readonly number[] = [
+  0.0005,
+  0.002,
+  ...Array.from({ length: 15 }, (_, k) => ((k + 1) / 16) ** 2 * (3 - (2 * (k + 1)) / 16)),
+  0.998,
+  0.9995,
+  0.9999,
+];
+
 const KEPT = 48;
 const cache = new Map<string, LiquidModel>();
 
@@ -40,8 +49,7 @@ function wetting(solvent: Solvent): number {
 function hasGap(first: string, second: string, temperatureK: number): boolean {
   const binary = prepareUnifac([first, second], temperatureK);
   let last = 0;
-  for (let step = 1; step < GAP_STEPS; step++) {
-    const x = step / GAP_STEPS;
+  for (const x of GRID) {
     const activity = x * Math.exp(lnGammas(binary, [x, 1 - x])[0] ?? 0);
     if (activity < last) return true;
     last = activity;
@@ -49,8 +57,16 @@ function hasGap(first: string, second: string, temperatureK: number): boolean {
   return last > 1;
 }
 
-function isWetted(first: Solvent | undefined, second: Solvent | undefined): boolean {
-  return first?.nucleophile === "water" && second?.waterSaturation !== undefined;
+/** Whether any two of the solvents split, by the table or by the model. */
+function anyGap(solvents: readonly Solvent[], temperatureK: number): boolean {
+  return solvents.some((first) =>
+    solvents.some(
+      (second) =>
+        first !== second &&
+        ((first.nucleophile === "water" && second.waterSaturation !== undefined) ||
+          hasGap(first.key, second.key, temperatureK)),
+    ),
+  );
 }
 
 function build(keys: readonly string[], temperatureK: number): LiquidModel {
@@ -61,11 +77,7 @@ function build(keys: readonly string[], temperatureK: number): LiquidModel {
     unifac: prepareUnifac(keys, temperatureK),
     water: solvents.findIndex((solvent) => solvent.nucleophile === "water"),
     ...(mends.some((mend) => mend !== 0) ? { wetting: mends } : {}),
-    gap: keys.map(
-      (key, i) =>
-        solvents[i]?.nucleophile !== "none" &&
-        keys.some((other, j) => j !== i && (isWetted(solvents[i], solvents[j]) || hasGap(key, other, temperatureK))),
-    ),
+    gap: anyGap(solvents, temperatureK),
   };
 }
 

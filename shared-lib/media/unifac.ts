@@ -31,6 +31,8 @@ export function hasGroups(solvent: string): boolean {
 export interface UnifacMixture {
   readonly size: number;
   readonly groupCount: number;
+  /** Main group of every group. */
+  readonly mains: readonly number[];
   /** Count of group k in component i at [i × groupCount + k]. */
   readonly counts: Float64Array;
   readonly groupArea: Float64Array;
@@ -43,6 +45,24 @@ export interface UnifacMixture {
   readonly pure: Float64Array;
   /** Some pair of groups was never published: its parameters are predicted. */
   readonly predicted: boolean;
+  /** Room for intermediate results, so that a calculation allocates nothing but its answer. */
+  readonly work: Work;
+}
+
+interface Work {
+  readonly mixed: Float64Array;
+  readonly theta: Float64Array;
+  readonly share: Float64Array;
+  readonly lnGamma: Float64Array;
+}
+
+function workFor(groups: number): Work {
+  return {
+    mixed: new Float64Array(groups),
+    theta: new Float64Array(groups),
+    share: new Float64Array(groups),
+    lnGamma: new Float64Array(groups),
+  };
 }
 
 function interactions(mains: readonly number[], temperatureK: number): { psi: Float64Array; predicted: boolean } {
@@ -61,17 +81,15 @@ function interactions(mains: readonly number[], temperatureK: number): { psi: Fl
   return { psi, predicted: !published };
 }
 
-/** ln Γ of every group for `counts` of groups (any unit). */
-function groupActivities(counts: Float64Array, area: Float64Array, psi: Float64Array): Float64Array {
+/** ln Γ of every group for `counts` of groups (any unit); the answer is `work.lnGamma`, valid until the next call. */
+function groupActivities(counts: Float64Array, area: Float64Array, psi: Float64Array, work: Work): Float64Array {
   const n = area.length;
-  const theta = new Float64Array(n);
+  const { theta, share, lnGamma } = work;
   let total = 0;
   for (let k = 0; k < n; k++) {
     theta[k] = (counts[k] as number) * (area[k] as number);
     total += theta[k] as number;
   }
-  const share = new Float64Array(n);
-  const lnGamma = new Float64Array(n);
   for (let k = 0; k < n; k++) {
     let sum = 0;
     for (let m = 0; m < n; m++) sum += (theta[m] as number) * (psi[m * n + k] as number);
@@ -96,10 +114,8 @@ export function prepareUnifac(solvents: readonly string[], temperatureK: number)
   const own = solvents.map((solvent) => makeup[solvent] ?? {});
   const ids = [...new Set(own.flatMap((groups) => Object.keys(groups)))];
   const rows = ids.map((id) => subgroups[id] ?? ([0, 0, 0] as const));
-  const { psi, predicted } = interactions(
-    rows.map(([main]) => main),
-    temperatureK,
-  );
+  const mains = rows.map(([main]) => main);
+  const { psi, predicted } = interactions(mains, temperatureK);
   const n = ids.length;
   const counts = new Float64Array(solvents.length * n);
   own.forEach((groups, i) => {
@@ -113,14 +129,16 @@ export function prepareUnifac(solvents: readonly string[], temperatureK: number)
       rows.reduce((sum, row, k) => sum + (counts[i * n + k] as number) * row[column], 0),
     );
   const r = total(1);
+  const work = workFor(n);
   const pure = Float64Array.from(own, (_, i) => {
     const mine = counts.subarray(i * n, (i + 1) * n);
-    const lnGamma = groupActivities(mine, groupArea, psi);
+    const lnGamma = groupActivities(mine, groupArea, psi, work);
     return mine.reduce((sum, count, k) => (count === 0 ? sum : sum + count * (lnGamma[k] as number)), 0);
   });
   return {
     size: solvents.length,
     groupCount: n,
+    mains,
     counts,
     groupArea,
     psi,
@@ -129,13 +147,15 @@ export function prepareUnifac(solvents: readonly string[], temperatureK: number)
     q: total(2),
     pure,
     predicted,
+    work,
   };
 }
 
 /** ln γ of every component (pure liquid = 0) at mole fractions `x`, adding up to 1. */
 export function lnGammas(mixture: UnifacMixture, x: ArrayLike<number>): Float64Array {
   const { size, groupCount: n, counts, r, q, rPower } = mixture;
-  const mixed = new Float64Array(n);
+  const { mixed } = mixture.work;
+  mixed.fill(0);
   let rMean = 0;
   let qMean = 0;
   let rPowerMean = 0;
@@ -146,7 +166,7 @@ export function lnGammas(mixture: UnifacMixture, x: ArrayLike<number>): Float64A
     rPowerMean += xi * (rPower[i] as number);
     for (let k = 0; k < n; k++) mixed[k] = (mixed[k] as number) + xi * (counts[i * n + k] as number);
   }
-  const group = groupActivities(mixed, mixture.groupArea, mixture.psi);
+  const group = groupActivities(mixed, mixture.groupArea, mixture.psi, mixture.work);
   const result = new Float64Array(size);
   for (let i = 0; i < size; i++) {
     const v = (r[i] as number) / rMean;
