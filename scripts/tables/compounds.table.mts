@@ -1,4 +1,6 @@
 /** The catalogue: compounds with their perceived structure, supplied forms, and every name that leads to them. */
+
+import { readFragment } from "../../shared-lib/compounds/name-grammar/molecule.ts";
 import { createStructureToolkit } from "../../shared-lib/compounds/structure.ts";
 import { REAGENT_TAGS } from "../../shared-lib/compounds/tags.ts";
 import type { CompileTables } from "../compile-tables.mts";
@@ -92,6 +94,27 @@ function formOf(row: TableRow, known: ReadonlySet<string>) {
   };
 }
 
+const GRAMMAR = "shared-lib/compounds/name-grammar";
+
+/** Rows of the name grammar's tables; every fragment must parse and have as many locants as atoms. */
+async function grammarRows(): Promise<Record<string, string[][]>> {
+  const tables = { parents: "stem", groups: "name", retained: "name" };
+  const result: Record<string, string[][]> = {};
+  for (const [table, key] of Object.entries(tables)) {
+    const rows = await readTsv(`${GRAMMAR}/${table}.tsv`, [key, "smiles", "locants", "free"]);
+    result[table] = rows.map((row) => {
+      const { smiles = "", locants = "", free = "" } = row.cells;
+      if (smiles !== "!") {
+        const atoms = readFragment(smiles.replace(/^=/, "")).atoms.length;
+        const count = locants === "" || locants === "-" ? atoms : locants.split(" ").length;
+        if (count !== atoms) throw new Error(`${row.place}: ${count} locants for ${atoms} atoms`);
+      }
+      return [row.cells[key] as string, smiles, locants, free];
+    });
+  }
+  return result;
+}
+
 export const compile: CompileTables = async () => {
   const columns = ["id", "synonyms", "smiles", "cas", "density", "tags"];
   const rows = [
@@ -112,5 +135,10 @@ export const compile: CompileTables = async () => {
       "source",
     ])
   ).map((row) => formOf(row, known));
-  return { "compounds.json": JSON.stringify(compounds), "supplied-forms.json": JSON.stringify(forms) };
+  const grammar = await grammarRows();
+  return {
+    "name-grammar.json": JSON.stringify(grammar),
+    "compounds.json": JSON.stringify(compounds),
+    "supplied-forms.json": JSON.stringify(forms),
+  };
 };

@@ -5,6 +5,7 @@ import formTable from "../generated/supplied-forms.json" with { type: "json" };
 import { allBuffers } from "../media/buffers.ts";
 import { allSolvents, type Solvent } from "../media/solvents.ts";
 import type { Lexicon } from "./lexicon.ts";
+import { grammarName, grammarNameAt } from "./name-grammar/names-in-text.ts";
 import { isLetter, isWordCharacter, plainText } from "./normal-form.ts";
 import type { ReagentTag } from "./tags.ts";
 import type { Compound, NameMatch, StructureToolkit, SuppliedForm } from "./types.ts";
@@ -163,7 +164,45 @@ class CatalogueLexicon implements Lexicon {
     return entry && (entry.exact === undefined || entry.exact === plain) ? entry : undefined;
   }
 
-  matchAt(text: string, at: number, _structures?: StructureToolkit): NameMatch | undefined {
+  matchAt(text: string, at: number, structures?: StructureToolkit): NameMatch | "needs structures" | undefined {
+    const listed = this.#listedAt(text, at);
+    if (listed) return listed;
+    const read = grammarNameAt(text, at);
+    return read && this.#fromStructure(read.smiles, text.slice(at, read.end), at, read.end, structures);
+  }
+
+  /** A compound from its structure; the catalogue's own where it holds it, so that both are one compound. */
+  #fromStructure(
+    smiles: string,
+    name: string,
+    start: number,
+    end: number,
+    structures: StructureToolkit | undefined,
+  ): NameMatch | "needs structures" | undefined {
+    if (!structures) return "needs structures";
+    const reading = structures.read(smiles);
+    if (!reading.ok) return undefined;
+    const known = this.#bySmiles.get(reading.canonicalSmiles);
+    if (known) return { start, end, compound: known, by: "grammar" };
+    const { carbonyl } = reading;
+    return {
+      start,
+      end,
+      by: "grammar",
+      compound: {
+        id: reading.canonicalSmiles,
+        name,
+        smiles: reading.canonicalSmiles,
+        formula: reading.formula,
+        molarMass: reading.molarMass,
+        tags: carbonyl ? [carbonyl.sites.some((site) => site.hydrogens > 0) ? "aldehyde" : "ketone"] : [],
+        ...(carbonyl ? { carbonyl } : {}),
+        origin: "name",
+      },
+    };
+  }
+
+  #listedAt(text: string, at: number): NameMatch | undefined {
     const words = this.#starts.get(firstRun(text, at) || (text[at] ?? ""));
     if (words === undefined) return undefined;
     for (const end of candidateEnds(text, at, Math.min(words, LONGEST_NAME_WORDS))) {
@@ -174,10 +213,12 @@ class CatalogueLexicon implements Lexicon {
     return undefined;
   }
 
-  find(whole: string, _structures?: StructureToolkit): NameMatch | undefined {
+  find(whole: string, structures?: StructureToolkit): NameMatch | "needs structures" | undefined {
     const name = plainText(whole.trim());
     const entry = this.#byCas.get(name) ?? this.#entry(name) ?? this.#byName.get(name.toLowerCase());
-    return entry ? match(0, whole.length, entry) : undefined;
+    if (entry) return match(0, whole.length, entry);
+    const smiles = grammarName(name);
+    return smiles === undefined ? undefined : this.#fromStructure(smiles, whole.trim(), 0, whole.length, structures);
   }
 
   compound(id: string): Compound | undefined {

@@ -29,6 +29,14 @@ const ELEMENTS = new Set(
 );
 const BONDS = new Set([..."-=#$:/\\"]);
 
+const NUMBER_OF = new Map([...ELEMENTS].map((element, i) => [element, i + 1]));
+
+/** A mass number that the element can have: never fewer nucleons than protons, never far more than three times as many. */
+function isIsotope(mass: number, element: string): boolean {
+  const protons = NUMBER_OF.get(`${element[0]?.toUpperCase()}${element.slice(1)}`) ?? 0;
+  return mass >= protons && mass <= 2.6 * protons + 4;
+}
+
 const isDigit = (c: string | undefined): boolean => c !== undefined && c >= "0" && c <= "9";
 
 /** Length of a bracket atom's content up to `]`, or the fault in it. Grammar: isotope? symbol chiral? hcount? charge? class? */
@@ -37,7 +45,6 @@ function scanBracket(smiles: string, open: number): { end: number; aromatic: boo
   if (close < 0) return { problem: "the bracket atom is not closed: add ]", at: open };
   let i = open + 1;
   while (isDigit(smiles[i])) i++;
-  if (i - open > 4) return { problem: "no isotope has that mass number", at: open + 1 };
   const isotopeEnd = i;
   const two = smiles.slice(i, i + 2);
   const one = smiles.slice(i, i + 1);
@@ -49,9 +56,10 @@ function scanBracket(smiles: string, open: number): { end: number; aromatic: boo
     aromatic = AROMATIC_BRACKET.has(one);
     i += 1;
   } else return { problem: `"${smiles.slice(open, close + 1)}" names no element`, at: open };
-  const isotope = Number(smiles.slice(open + 1, isotopeEnd));
-  if (isotope > 300) return { problem: "no isotope has that mass number", at: open + 1 };
-  while (smiles[i] === "@") i++;
+  const element = smiles.slice(isotopeEnd, i);
+  if (isotopeEnd > open + 1 && !isIsotope(Number(smiles.slice(open + 1, isotopeEnd)), element))
+    return { problem: `no isotope of ${element} has the mass number ${smiles.slice(open + 1, isotopeEnd)}`, at: open + 1 };
+  if (smiles[i] === "@") i += smiles[i + 1] === "@" ? 2 : 1;
   if (smiles[i] === "H") {
     i++;
     while (isDigit(smiles[i])) i++;
@@ -133,7 +141,7 @@ export function scanSmiles(smiles: string): SmilesScan | SmilesFault {
   const open = branches[0];
   if (open !== undefined) return fault("the branch is not closed: add )", open);
   const ring = [...rings.values()][0];
-  if (ring !== undefined) return fault(`ring ${smiles[ring]} is not closed`, ring);
+  if (ring !== undefined) return fault(`ring ${smiles.slice(ring, ring + (smiles[ring] === "%" ? 3 : 1))} is not closed`, ring);
   if (before !== "atom") return fault("the SMILES ends where an atom must follow", smiles.length);
   return { atoms };
 }

@@ -50,8 +50,10 @@ function chemicalFault(
   molecule: Molecule,
   scanned: readonly { readonly aromatic: boolean; readonly bracket: boolean; readonly at: number }[],
 ): { problem: string; at?: number } | undefined {
+  // The library moves H that are written as atoms to the end: places are then no longer those of the text.
+  const inOrder = molecule.getAtoms() === scanned.length;
   for (let i = 0; i < molecule.getAllAtoms(); i++) {
-    const written = scanned[i];
+    const written = inOrder ? scanned[i] : undefined;
     const label = molecule.getAtomLabel(i);
     const at = written ? { at: written.at } : {};
     if (NON_METALS.has(label) && molecule.getFreeValence(i) < 0)
@@ -61,6 +63,8 @@ function chemicalFault(
       };
     if (written?.aromatic && molecule.getAtomRadical(i) !== 0)
       return { problem: "the aromatic ring does not close: no alternation of bonds fits it", ...at };
+    if (written?.aromatic && !molecule.isRingAtom(i))
+      return { problem: `${label} is written as aromatic but stands in no ring: write a capital letter`, ...at };
     if (molecule.getAtomRadical(i) !== 0 && NON_METALS.has(label))
       return { problem: `${label} is a radical as written: the model knows none`, ...at };
   }

@@ -27,9 +27,12 @@ export function othersOf(graph: MoleculeGraph, index: number, from: number): Gra
   return atomAt(graph, index).neighbours.filter((bond) => bond.atom !== from);
 }
 
-/** Has a double bond to O. */
+/** Has a double bond to an uncharged O. */
 export function hasOxo(graph: MoleculeGraph, index: number): boolean {
-  return atomAt(graph, index).neighbours.some((bond) => bond.order === 2 && atomAt(graph, bond.atom).element === "O");
+  return atomAt(graph, index).neighbours.some((bond) => {
+    const other = atomAt(graph, bond.atom);
+    return bond.order === 2 && other.element === "O" && other.charge === 0;
+  });
 }
 
 /** Smallest ring that holds `index`, or undefined. */
