@@ -45,39 +45,40 @@ function wetting(solvent: Solvent): number {
   return value;
 }
 
-/** Whether the activity of the first of two solvents ever falls while its share rises. */
-function hasGap(first: string, second: string, temperatureK: number): boolean {
-  const binary = prepareUnifac([first, second], temperatureK);
+/** Whether the activity of component `i` ever falls while its share beside component `j` rises, by the tables of the whole mixture. */
+function hasGap(unifac: UnifacMixture, i: number, j: number): boolean {
+  const x = new Float64Array(unifac.size);
   let last = 0;
-  for (const x of GRID) {
-    const activity = x * Math.exp(lnGammas(binary, [x, 1 - x])[0] ?? 0);
+  for (const share of GRID) {
+    x[i] = share;
+    x[j] = 1 - share;
+    const activity = share * Math.exp(lnGammas(unifac, x)[i] as number);
     if (activity < last) return true;
     last = activity;
   }
-  return last > 1;
+  return false;
 }
 
-/** Whether any two of the solvents split, by the table or by the model. */
-function anyGap(solvents: readonly Solvent[], temperatureK: number): boolean {
-  return solvents.some((first) =>
+/** Whether any two of the solvents split, by the table of solubilities or by the model. */
+function anyGap(solvents: readonly Solvent[], unifac: UnifacMixture): boolean {
+  return solvents.some((first, i) =>
     solvents.some(
-      (second) =>
-        first !== second &&
-        ((first.nucleophile === "water" && second.waterSaturation !== undefined) ||
-          hasGap(first.key, second.key, temperatureK)),
+      (second, j) =>
+        i !== j && ((first.nucleophile === "water" && second.waterSaturation !== undefined) || hasGap(unifac, i, j)),
     ),
   );
 }
 
 function build(keys: readonly string[], temperatureK: number): LiquidModel {
   const solvents = keys.map((key) => solventByKey(key) as Solvent);
+  const unifac = prepareUnifac(keys, temperatureK);
   const mends = solvents.map(wetting);
   return {
     solvents,
-    unifac: prepareUnifac(keys, temperatureK),
+    unifac,
     water: solvents.findIndex((solvent) => solvent.nucleophile === "water"),
     ...(mends.some((mend) => mend !== 0) ? { wetting: mends } : {}),
-    gap: anyGap(solvents, temperatureK),
+    gap: anyGap(solvents, unifac),
   };
 }
 
