@@ -47,7 +47,9 @@ export function answerEditor(context: AnswerContext): void {
 
   connection.onHover(ofNote("hover", null, (note, params) => hover(context, note, params)));
   connection.onCodeAction(
-    ofNote("code action", [], (note, params) => codeActionsOf(note, params, { pages: abilities().pages })),
+    ofNote("code action", [], (note, params) =>
+      codeActionsOf(note, params, { pages: abilities().pages, lexicon: context.engine.lexicon() }),
+    ),
   );
   connection.onCodeLens(
     ofNote("code lens", [], (note) => {

@@ -13,8 +13,8 @@ export interface StartOptions {
   /** The client opens `oxomargin:` addresses (pages of findings). */
   readonly pages?: boolean;
   readonly theme?: Theme;
-  /** Browser only: address of the script that holds the structure toolkit. */
-  readonly structuresScript?: string;
+  /** Browser only: address of the module that holds the structure toolkit. */
+  readonly structuresModule?: string;
 }
 
 export type Theme = "light" | "dark" | "high contrast dark" | "high contrast light";

@@ -18,7 +18,7 @@ import { answerOwnClient, ESTIMATE_COMMAND } from "./answer-own-client.ts";
 import { createConfiguration } from "./configuration.ts";
 import { createDrawings } from "./drawings.ts";
 import { createEngine } from "./engine.ts";
-import { FIX_ALL } from "./features/code-actions.ts";
+import { FIX_ALL, LEDGER } from "./features/code-actions.ts";
 import { LEGEND } from "./features/semantic-tokens.ts";
 import { createGuard } from "./guard.ts";
 import { createNoteStore, type OpenNote } from "./notes.ts";
@@ -99,7 +99,7 @@ function serverAbilities(params: InitializeParams, abilities: ClientAbilities): 
       positionEncoding: "utf-16",
       textDocumentSync: { openClose: true, change: TextDocumentSyncKind.Incremental },
       hoverProvider: true,
-      codeActionProvider: { codeActionKinds: ["quickfix", FIX_ALL] },
+      codeActionProvider: { codeActionKinds: ["quickfix", FIX_ALL, LEDGER] },
       inlayHintProvider: { resolveProvider: true },
       codeLensProvider: { resolveProvider: false },
       documentSymbolProvider: true,

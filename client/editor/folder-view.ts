@@ -68,7 +68,6 @@ export class FolderView implements vscode.TreeDataProvider<Row> {
   #say(read: number, unread: number, stopped: boolean): void {
     const count = this.#notes.reduce((sum, note) => sum + note.findings.length, 0);
     if (!this.#view) return;
-    this.#view.badge = count > 0 ? { value: count, tooltip: vscode.l10n.t("{0} findings", count) } : undefined;
     const parts = [vscode.l10n.t("{0} findings in {1} of {2} notes", count, this.#notes.length, read)];
     if (unread > 0) parts.push(vscode.l10n.t("{0} could not be read", unread));
     if (stopped) parts.push(vscode.l10n.t("stopped before the end"));

@@ -15,7 +15,7 @@ export function activate(context: vscode.ExtensionContext): Extension {
         "oxomargin",
         "Oxomargin",
         new Worker(address("server-worker.js")),
-        clientOptions({ structuresScript: address("structures.js") }),
+        clientOptions({ structuresModule: address("structures.mjs") }),
       ),
   );
 }

@@ -29,7 +29,6 @@ export function clientOptions(more: Partial<StartOptions>) {
     commandLinks: true,
     pages: true,
     theme: themeNow(),
-    settings: vscode.workspace.getConfiguration("oxomargin"),
     ...more,
   };
   return {

@@ -6,25 +6,32 @@ import {
   type CodeActionParams,
   type Diagnostic,
 } from "vscode-languageserver-protocol";
+import { ledgerActions } from "../../shared-lib/advice/ledger/in-note.ts";
 import type { Finding } from "../../shared-lib/advice/types.ts";
+import type { Lexicon } from "../../shared-lib/compounds/lexicon.ts";
 import type { TextEdit as OffsetEdit } from "../../shared-lib/model/contract.ts";
 import { formatOf, type OpenNote } from "../notes.ts";
 import { overlaps, rangeOf, spanOf } from "../ranges.ts";
 import { diagnosticsOf } from "./diagnostics.ts";
 
+/** Puts the ledger of a step into the note, or renews it. */
+export const LEDGER = `${CodeActionKind.RefactorRewrite}.oxomargin.ledger`;
+
 /** Every correction that needs no judgement, of the whole note. */
 export const FIX_ALL = `${CodeActionKind.SourceFixAll}.oxomargin`;
 
-export function codeActionsOf(
-  note: OpenNote,
-  params: CodeActionParams,
-  options: { readonly pages: boolean },
-): CodeAction[] {
+interface CodeActionOptions {
+  readonly pages: boolean;
+  readonly lexicon: Lexicon;
+}
+
+export function codeActionsOf(note: OpenNote, params: CodeActionParams, options: CodeActionOptions): CodeAction[] {
   const wants = (kind: string): boolean =>
     params.context.only === undefined ||
     params.context.only.some((only) => kind === only || kind.startsWith(`${only}.`));
   const actions: CodeAction[] = [];
   if (wants(CodeActionKind.QuickFix)) actions.push(...quickFixes(note, params, options));
+  if (wants(LEDGER)) actions.push(...ledgers(note, params, options.lexicon));
   if (params.context.only !== undefined && wants(FIX_ALL)) actions.push(...fixAll(note));
   return actions;
 }
@@ -44,15 +51,23 @@ function quickFixes(note: OpenNote, params: CodeActionParams, options: { readonl
       edit: { changes: { [note.document.uri]: editsOf(note, fix.edits) } },
     })),
   );
-  const silences = here.flatMap(({ finding, diagnostic }) =>
-    silencing(note, finding).map(({ title, edit }) => ({
-      title,
-      kind: CodeActionKind.QuickFix,
-      diagnostics: [diagnostic],
-      edit: { changes: { [note.document.uri]: editsOf(note, [edit]) } },
-    })),
-  );
+  const silences = here.map(({ finding, diagnostic }) => {
+    const { title, edit } = silencing(note, finding);
+    const changes = { [note.document.uri]: editsOf(note, [edit]) };
+    return { title, kind: CodeActionKind.QuickFix, diagnostics: [diagnostic], edit: { changes } };
+  });
   return [...fixes, ...silences];
+}
+
+function ledgers(note: OpenNote, params: CodeActionParams, lexicon: Lexicon): CodeAction[] {
+  const { reading, charges, moments } = note.analysis;
+  const text = note.document.getText();
+  const input = { text, reading, timeline: { charges, moments }, moments, settings: note.settings.analysis, lexicon };
+  return ledgerActions(input, note.document.offsetAt(params.range.start)).map((fix) => ({
+    title: fix.title,
+    kind: LEDGER,
+    edit: { changes: { [note.document.uri]: editsOf(note, fix.edits) } },
+  }));
 }
 
 function editsOf(note: OpenNote, edits: readonly OffsetEdit[]) {
@@ -60,10 +75,10 @@ function editsOf(note: OpenNote, edits: readonly OffsetEdit[]) {
 }
 
 /**
- * Directives that silence a finding: on a line of its own before a paragraph (it governs the next line; inside a list or a table it
- * would break them, so there it is not offered), and at the end of the note for the whole of it.
+ * A directive that silences a finding: on a line of its own before a paragraph (it governs the next line), else at the end of the note
+ * for the whole of it: inside a list or a table a line of its own would break them.
  */
-function silencing(note: OpenNote, finding: Finding): { readonly title: string; readonly edit: OffsetEdit }[] {
+function silencing(note: OpenNote, finding: Finding): { readonly title: string; readonly edit: OffsetEdit } {
   const text = note.document.getText();
   const newLine = text.includes("\r\n") ? "\r\n" : "\n";
   const plain = formatOf(note.document) === "plain";
@@ -78,10 +93,9 @@ function silencing(note: OpenNote, finding: Finding): { readonly title: string; 
   const here = { start, end: start, text: `${directive("silence")}${newLine}` };
   const lead = text === "" || text.endsWith("\n") ? newLine : newLine + newLine;
   const whole = { start: text.length, end: text.length, text: `${lead}${directive("silence-file")}${newLine}` };
-  return [
-    ...(opensBlock ? [{ title: `Silence “${finding.code}” here`, edit: here }] : []),
-    { title: `Silence “${finding.code}” in this note`, edit: whole },
-  ];
+  return opensBlock
+    ? { title: `Silence “${finding.code}” here`, edit: here }
+    : { title: `Silence “${finding.code}” in this note`, edit: whole };
 }
 
 /** Safe corrections of the whole note that do not touch each other. */

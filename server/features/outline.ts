@@ -18,7 +18,7 @@ export function symbolsOf(note: OpenNote): DocumentSymbol[] {
     const children = reading.charges
       .filter((charge) => charge.step === step.number && inside(charge.span, step))
       .map((charge) => chargeSymbol(note, charge));
-    const name = step.title === undefined ? `Step ${step.number}` : `Step ${step.number}: ${step.title}`;
+    const name = step.title?.trim() || `Step ${step.number}`;
     return {
       name,
       kind: SymbolKind.Namespace,

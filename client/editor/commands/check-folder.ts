@@ -11,7 +11,10 @@ export function registerCheckFolder(view: FolderView): vscode.Disposable {
         title: vscode.l10n.t("Oxomargin: reading notes"),
         cancellable: true,
       },
-      (progress, token) => view.fill(progress, token),
+      async (progress, token) => {
+        await view.fill(progress, token);
+        await vscode.commands.executeCommand("oxomargin.folder.focus");
+      },
     ),
   );
 }

@@ -4,9 +4,15 @@ import * as vscode from "vscode";
 import { type ListedEstimate, METHODS } from "../../../server/protocol.ts";
 import type { Server } from "../server.ts";
 
+/** Kind of the server's action that puts in or renews a ledger. */
+const LEDGER_KIND = "refactor.rewrite.oxomargin.ledger";
+
 export function registerList(server: Server): vscode.Disposable[] {
   return [
     vscode.commands.registerTextEditorCommand("oxomargin.listEstimates", (editor) => void list(server, editor)),
+    vscode.commands.registerTextEditorCommand("oxomargin.insertLedger", () =>
+      vscode.commands.executeCommand("editor.action.codeAction", { kind: LEDGER_KIND, apply: "first" }),
+    ),
     vscode.commands.registerCommand("oxomargin.copyCard", async (uri?: string, line?: number, character?: number) => {
       const place = placeOf(uri, line, character);
       const card = place ? await server.request<string>(METHODS.card, place) : "";

@@ -27,7 +27,7 @@ type TokenClass = new (type: string, tag: string, nesting: -1 | 0 | 1) => Childr
 
 function chipHtml(md: MarkdownIt, label: MarginLabel): string {
   const { escapeHtml } = md.utils;
-  return ` <span class="oxomargin-label" title="${escapeHtml(label.tip)}">${escapeHtml(label.label)}</span>`;
+  return ` <small class="oxomargin-label" title="${escapeHtml(label.tip)}">[${escapeHtml(label.label)}]</small>`;
 }
 
 /** Behind the first text that holds the words, else at the end of the block. */

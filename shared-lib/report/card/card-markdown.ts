@@ -13,6 +13,7 @@ export interface CardOptions {
 }
 
 const MOST_FORMS = 6;
+const LEAST_LISTED = 0.001;
 const LEAST_DRAWN = 0.005;
 const DRAWING = { width: 132, height: 84 };
 
@@ -42,8 +43,14 @@ function lineMarkdown(line: DerivationLine): string {
   return `${plain(line.says)}${value}${source}`;
 }
 
+/** Largest first; a form that cannot reach a thousandth is left out. */
+function formsWorthShowing(forms: readonly FormShare[]): readonly FormShare[] {
+  const sorted = [...forms].sort((a, b) => b.fraction.value - a.fraction.value);
+  return sorted.filter((form, rank) => rank < 2 || form.fraction.high >= LEAST_LISTED).slice(0, MOST_FORMS);
+}
+
 function formsTable(forms: readonly FormShare[], options: CardOptions): string {
-  const shown = [...forms].sort((a, b) => b.fraction.value - a.fraction.value).slice(0, MOST_FORMS);
+  const shown = formsWorthShowing(forms);
   const drawings = shown.map((form) => drawing(form, options));
   const drawn = drawings.some((text) => text !== "");
   const head = drawn
@@ -53,8 +60,7 @@ function formsTable(forms: readonly FormShare[], options: CardOptions): string {
     const structure = drawn ? ` ${drawings[index]} |` : "";
     return `| ${plain(form.label)} |${structure} ${percent(form.fraction.value)} ${shareBar(form.fraction.value)} | ${percentRange(form.fraction)} |`;
   });
-  const left = forms.length - shown.length;
-  return [...head, ...rows].join("\n") + (left > 0 ? `\n\n${left} smaller forms are not shown.` : "");
+  return [...head, ...rows].join("\n");
 }
 
 function drawing(form: FormShare, options: CardOptions): string {

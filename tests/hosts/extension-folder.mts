@@ -1,0 +1,26 @@
+/** Unpacks the .vsix that was just built, so that the hosts run what a user installs. */
+
+import { execFileSync } from "node:child_process";
+import { mkdtempSync, readdirSync, readFileSync, statSync } from "node:fs";
+import { tmpdir } from "node:os";
+import path from "node:path";
+
+const VSIX = "dist/oxomargin.vsix";
+const LARGEST_BYTES = 1_500_000;
+
+/** @returns the folder of the extension; @throws Error when the .vsix is missing or too large */
+export function unpackExtension(): string {
+  const { size } = statSync(VSIX);
+  console.log(`  ${VSIX}: ${(size / 1e6).toFixed(2)} MB`);
+  if (size > LARGEST_BYTES) throw new Error(`${VSIX} is larger than ${LARGEST_BYTES / 1e6} MB`);
+  const folder = mkdtempSync(path.join(tmpdir(), "oxomargin-vsix-"));
+  execFileSync("python3", ["-m", "zipfile", "-e", VSIX, folder]);
+  return path.join(folder, "extension");
+}
+
+/** The example notes by file name, as the workspace that the hosts open. */
+export function exampleNotes(): Record<string, string> {
+  const folder = "media/example-notes";
+  const names = readdirSync(folder).filter((name) => /\.(md|txt)$/.test(name));
+  return Object.fromEntries(names.map((name) => [name, readFileSync(path.join(folder, name), "utf8")]));
+}
