@@ -121,6 +121,15 @@ function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: Pl
   return { ...site, hydrateSmiles, closure: { ringSize: closureOxygen.ringSize, smiles: ring.toIsomericSmiles() } };
 }
 
+/**
+ * One SMILES for a structure however it was written: atoms in the order of the library's canonical code. That code drops stereo read
+ * without coordinates, so a SMILES with stereo keeps the library's own order.
+ */
+function canonicalSmiles(molecule: Molecule): string {
+  const own = molecule.toIsomericSmiles();
+  return /[@/\\]/.test(own) ? own : Molecule.fromIDCode(molecule.getIDCode(), false).toIsomericSmiles();
+}
+
 interface Parent {
   readonly smiles: string;
   /** A basic N is protonated as written. */
@@ -146,7 +155,7 @@ function parentOf(molecule: Molecule, canonical: string): Parent | undefined {
       cation ||= fragment.getAtomCharge(i) > 0;
       fragment.setAtomCharge(i, 0);
     }
-    parents.add(fragment.toIsomericSmiles());
+    parents.add(canonicalOf(fragment));
   }
   const [smiles] = parents;
   return parents.size === 1 && smiles !== undefined ? { smiles, cation } : undefined;
@@ -197,15 +206,26 @@ function carbonylOf(
   return { carbonyl: { sites, ionisable: seen.ionisable } };
 }
 
+/**
+ * One SMILES for one constitution, whatever the order in which it was written: the toolkit's own writer follows the input's order, so it is
+ * given the molecule in the order of its canonical code. Stereocentres are dropped with the coordinates; no constant here depends on them.
+ */
+function canonicalOf(molecule: Molecule): string {
+  return Molecule.fromIDCode(molecule.getIDCode(), false).toIsomericSmiles();
+}
+
 function read(smiles: string): StructureReading {
   const parsed = parse(smiles);
   if ("problem" in parsed) return { ok: false, ...parsed };
   try {
-    const { molecule } = parsed;
+    const canonicalSmiles = canonicalOf(parsed.molecule);
+    // Read again in canonical order: the sites' atoms are those of the SMILES that is given out.
+    const molecule = Molecule.fromSmiles(canonicalSmiles, { noCoordinates: true });
+    molecule.ensureHelperArrays(Molecule.cHelperRings);
     const formula = molecule.getMolecularFormula();
     const known = {
       ok: true as const,
-      canonicalSmiles: molecule.toIsomericSmiles(),
+      canonicalSmiles,
       formula: formula.formula,
       molarMass: formula.relativeWeight,
     };
