@@ -58,7 +58,10 @@ function scanBracket(smiles: string, open: number): { end: number; aromatic: boo
   } else return { problem: `"${smiles.slice(open, close + 1)}" names no element`, at: open };
   const element = smiles.slice(isotopeEnd, i);
   if (isotopeEnd > open + 1 && !isIsotope(Number(smiles.slice(open + 1, isotopeEnd)), element))
-    return { problem: `no isotope of ${element} has the mass number ${smiles.slice(open + 1, isotopeEnd)}`, at: open + 1 };
+    return {
+      problem: `no isotope of ${element} has the mass number ${smiles.slice(open + 1, isotopeEnd)}`,
+      at: open + 1,
+    };
   if (smiles[i] === "@") i += smiles[i + 1] === "@" ? 2 : 1;
   if (smiles[i] === "H") {
     i++;
@@ -141,7 +144,8 @@ export function scanSmiles(smiles: string): SmilesScan | SmilesFault {
   const open = branches[0];
   if (open !== undefined) return fault("the branch is not closed: add )", open);
   const ring = [...rings.values()][0];
-  if (ring !== undefined) return fault(`ring ${smiles.slice(ring, ring + (smiles[ring] === "%" ? 3 : 1))} is not closed`, ring);
+  if (ring !== undefined)
+    return fault(`ring ${smiles.slice(ring, ring + (smiles[ring] === "%" ? 3 : 1))} is not closed`, ring);
   if (before !== "atom") return fault("the SMILES ends where an atom must follow", smiles.length);
   return { atoms };
 }
