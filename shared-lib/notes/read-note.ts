@@ -9,6 +9,7 @@ import { readConditions } from "./conditions.ts";
 import { readDirectives } from "./directives.ts";
 import { statedForm } from "./forms.ts";
 import { mixtureOf } from "./media.ts";
+import { withoutOwnWords } from "./own-words.ts";
 import { type BlockReading, readBlock } from "./read-block.ts";
 import { absurdities } from "./sanity.ts";
 import type { Item } from "./scan.ts";
@@ -71,6 +72,9 @@ function dissolvedIn(reading: BlockReading, name: number): string | undefined {
   return undefined;
 }
 
+/** Supplied forms that are a compound of their own, with a structure to show. */
+const DEFINED_FORMS = new Set(["hydrate", "hemiacetal", "acetal", "oligomer", "adduct", "salt"]);
+
 function mentionOf(reading: BlockReading, name: number, block: Block, options: ReadOptions): Mention {
   const item = reading.scan.items[name] as NameItem;
   const { compound, form } = item.match;
@@ -86,7 +90,7 @@ function mentionOf(reading: BlockReading, name: number, block: Block, options: R
     end: block.start + item.end,
     text: block.text.slice(item.start, item.end),
     name: compound.name,
-    smiles: compound.smiles,
+    smiles: (stated.form && DEFINED_FORMS.has(stated.form.kind) ? stated.form.smiles : undefined) ?? compound.smiles,
     compound,
     ...(stated.form ? { form: stated.form } : {}),
     role: reading.roles.get(name) ?? "other",
@@ -105,7 +109,7 @@ function isCharge(mention: Mention, amounts: readonly Quantity[]): boolean {
 }
 
 function needsAqueous(mention: Mention, amounts: readonly Quantity[]): boolean {
-  const dissolved = amounts.some((amount) => amount.of === "concentration");
+  const dissolved = amounts.some((amount) => amount.of === "concentration" || (amount.of === "assay" && amount.base < 0.85));
   return (
     dissolved && (mention.compound?.tags.some((tag) => ["acid", "strong acid", "base", "salt"].includes(tag)) ?? false)
   );
@@ -135,6 +139,7 @@ function addCharge(
     ...(solvent && !mention.form ? { dissolvedIn: [{ solvent, words: solvent, basis: "volume", part: 1 }] } : {}),
   });
   draft.events.push({ kind: "charge", charge: draft.charges.length - 1, start, end, step, vessel: 0 });
+  addAqueous(draft, draft.charges.at(-1) as Charge, mention);
 }
 
 function addMedia(draft: Draft, reading: BlockReading, block: Block, step: number): void {
@@ -154,6 +159,16 @@ function addMedia(draft: Draft, reading: BlockReading, block: Block, step: numbe
     draft.events.push({ kind: "medium", medium: draft.media.length - 1, start, end, step, vessel: 0 });
     draft.solvents.push(...found.parts.flatMap((part) => part.solvent ?? []));
   }
+}
+
+/** An aqueous acid, base or salt ("2 N HCl (5 mL)", "48 % HBr") brings its water into the medium. */
+function addAqueous(draft: Draft, charge: Charge, mention: Mention): void {
+  const volume = charge.amounts.find((amount) => amount.of === "volume");
+  if (mention.carbonyl || !volume || charge.dissolvedIn?.[0]?.solvent !== "water") return;
+  const parts: MediumPhrase["parts"] = [{ solvent: "water", words: mention.text, basis: "volume", volumeL: volume.base }];
+  const { start, end } = mention;
+  draft.media.push({ start, end, step: charge.step, kind: "aqueous", parts, volumeL: volume.base });
+  draft.solvents.push("water");
 }
 
 function addConditions(draft: Draft, reading: BlockReading, block: Block, step: number, options: ReadOptions): void {
@@ -196,6 +211,13 @@ function readOne(draft: Draft, block: Block, options: ReadOptions): void {
   }
 }
 
+/** Kind of the whole medium of each step: a phrase is a part of it. */
+function stepKinds(media: readonly MediumPhrase[]): ReadonlyMap<number, MediumPhrase["kind"]> {
+  const parts = new Map<number, MediumPhrase["parts"][number][]>();
+  for (const medium of media) parts.set(medium.step, [...(parts.get(medium.step) ?? []), ...medium.parts]);
+  return new Map([...parts].map(([step, own]) => [step, mixtureOf(own).kind]));
+}
+
 /**
  * Reads a note.
  *
@@ -222,13 +244,14 @@ export function readNote(text: string, options: ReadOptions): NoteReading {
       code: "reading/size",
       message: `Only the first ${MOST_CHARACTERS / 1e6} million characters are read.`,
     });
-  for (const block of readBlocks(readable, options.format)) readOne(draft, block, options);
+  for (const block of readBlocks(withoutOwnWords(readable), options.format)) readOne(draft, block, options);
   const { directives, problems } = readDirectives(readable);
+  const kinds = stepKinds(draft.media);
   const order = (a: { start: number }, b: { start: number }): number => a.start - b.start;
   return {
     mentions: draft.mentions,
     charges: draft.charges,
-    media: draft.media,
+    media: draft.media.map((medium) => ({ ...medium, kind: kinds.get(medium.step) ?? medium.kind })),
     events: [...draft.events].sort((a, b) => a.step - b.step || order(a, b)),
     steps: draft.steps as readonly Step[],
     directives,

@@ -20,7 +20,7 @@ export interface SaidConsequence {
 }
 
 /** A loss of conversion below this is within the error of yields (common practice, no source). */
-const LEAST_LOSS = 0.02;
+const LEAST_LOSS = 0.05;
 
 const REFILLED = "equivalents stand, because the free share is made good as it is used up";
 const KEEP = "more equivalents or less of what binds it keep the conversion";
@@ -73,9 +73,13 @@ function ofEquilibrium(view: CarbonylView, title: string): SaidConsequence | und
   const loss = conversionLoss(view);
   if (loss && loss.most < LEAST_LOSS) return undefined;
   const range = loss
-    ? `: its conversion falls from ${percent(loss.without)} to ${percent(loss.bound)} for a usual constant, by at most ${percent(loss.most)}`
+    ? `: its conversion falls from ${percent(loss.without)} to ${percent(loss.bound)} for a usual constant, by at most ${Math.round(loss.most * 100)} points`
     : "";
-  return { severity: "note", says: `${title} is an equilibrium${range}; ${KEEP}`, mayRaise: true };
+  return {
+    severity: "note",
+    says: `${title} is an equilibrium${range}; ${KEEP}`,
+    mayRaise: !loss || loss.without - loss.bound >= LEAST_LOSS,
+  };
 }
 
 /** The corrections that a bound share calls for. */
