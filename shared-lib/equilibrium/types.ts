@@ -40,6 +40,11 @@ export interface CarbonylForms {
   readonly cautions: readonly string[];
   /** Why no estimate is given; then `forms` is empty. */
   readonly outside?: string;
+  /**
+   * Shares if the amines, hydroxylamines and hydrazines in the vessel, whose condensation is mostly the purpose of the step, came to
+   * equilibrium too; absent without such a partner or without a constant for it. `forms` and `free` are those before they do.
+   */
+  readonly withPartners?: { readonly forms: readonly FormShare[]; readonly free: Interval };
 }
 
 export interface Speciation {
@@ -49,6 +54,8 @@ export interface Speciation {
   readonly activities: Readonly<Record<string, number>>;
   /** L */
   readonly volumeL: number;
+  /** False when the balance met the bound on its passes first; the shares are then those of the last pass. */
+  readonly settled: boolean;
 }
 
 export interface SpeciateOptions {

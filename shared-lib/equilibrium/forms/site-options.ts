@@ -1,0 +1,214 @@
+/** What one site can become — open, hydrate, its anion, hemiacetals, a ring — in each charge state of the molecule. */
+
+import type { CarbonylSite } from "../../compounds/perception/types.ts";
+import type { Compound } from "../../compounds/types.ts";
+import type { DerivationLine, FormKind } from "../../model/contract.ts";
+import { adductConstant, readyShare } from "../adducts/adducts.ts";
+import { openStateRatio, siteAcidity } from "../charge-state.ts";
+import { hemiacetalConstant } from "../constants/hemiacetal.ts";
+import { hydrationConstant } from "../constants/hydration.ts";
+import type { ChargeState, ConstantEstimate, NoConstant } from "../constants/types.ts";
+import { diolAcidity } from "../diol-acidity.ts";
+import { ringClosure } from "../ring-closure.ts";
+import { type Conditions, type ErrorSources, type MediumCorrection, type SiteConstants, WATER } from "./species.ts";
+
+/** One form of a site, as its ratio to the open uncharged site. */
+export interface SiteOption {
+  readonly kind: FormKind;
+  readonly label: string;
+  readonly smiles?: string;
+  readonly ln: number;
+  readonly errors: ErrorSources;
+  readonly ligand?: string;
+  readonly correction?: MediumCorrection;
+}
+
+export interface SiteOptions {
+  readonly site: CarbonylSite;
+  /** The first one is the open uncharged site, with ln 0. */
+  readonly options: readonly SiteOption[];
+  readonly constants: SiteConstants;
+  readonly lines: readonly DerivationLine[];
+}
+
+const { LN10 } = Math;
+
+export const OPEN: SiteOption = { kind: "free carbonyl", label: "free carbonyl", ln: 0, errors: {} };
+
+/** How many sites of a molecule are like this one: a constant published for the molecule counts them all. */
+export function equivalentSites(sites: readonly CarbonylSite[], site: CarbonylSite): number {
+  return sites.filter(
+    (other) =>
+      other.class === site.class &&
+      other.hydrogens === site.hydrogens &&
+      Math.abs(other.sigmaStar - site.sigmaStar) < 1e-9,
+  ).length;
+}
+
+export function siteHydration(
+  compound: Compound,
+  site: CarbonylSite,
+  state: ChargeState,
+  conditions: Conditions,
+): ConstantEstimate | NoConstant {
+  return hydrationConstant(compound.smiles, site, equivalentSites(compound.carbonyl?.sites ?? [], site), {
+    temperatureK: conditions.temperatureK,
+    state,
+    correlationOnly: conditions.correlationOnly,
+  });
+}
+
+/** Perception of the site with its acid as carboxylate. */
+function inState(site: CarbonylSite, state: ChargeState): CarbonylSite {
+  return state === "anion" && site.acylKinds.includes("acid") ? { ...site, carboxylate: true } : site;
+}
+
+function diolCorrection(site: CarbonylSite): MediumCorrection {
+  if (site.class === "alpha-keto acid") return "diol of a keto acid";
+  return site.class === "trifluoromethyl ketone" && site.aryl ? "acidic diol" : "diol";
+}
+
+function hydrates(
+  site: CarbonylSite,
+  key: string,
+  hydration: ConstantEstimate,
+  before: SiteOption,
+  conditions: Conditions,
+): SiteOption[] {
+  if (!conditions.water) return [];
+  const ln = before.ln + LN10 * hydration.log10;
+  const errors = { ...before.errors, [`hydration ${key}`]: hydration.sd };
+  const acidity = diolAcidity(site);
+  const shared = { ligand: WATER, correction: diolCorrection(site) };
+  return [
+    { kind: "hydrate", label: "gem-diol hydrate", smiles: site.hydrateSmiles, ln, errors, ...shared },
+    {
+      kind: "hydrate anion",
+      label: "anion of the hydrate",
+      ln: ln + LN10 * (conditions.pH - acidity.pKa),
+      errors: { ...errors, [`diol acidity ${key}`]: acidity.sd },
+      ...shared,
+    },
+  ];
+}
+
+function hemiacetals(
+  site: CarbonylSite,
+  key: string,
+  hydration: ConstantEstimate,
+  before: SiteOption,
+  conditions: Conditions,
+) {
+  const options: SiteOption[] = [];
+  const alcohols: { name: string; constant: ConstantEstimate }[] = [];
+  for (const alcohol of conditions.alcohols) {
+    const constant = hemiacetalConstant(site, hydration, alcohol, conditions.temperatureK);
+    if (!constant) continue;
+    alcohols.push({ name: alcohol, constant });
+    // The hydration constant's error is shared with the hydrate; what the alcohol adds is its own.
+    const own = Math.sqrt(Math.max(0, constant.sd ** 2 - hydration.sd ** 2));
+    options.push({
+      kind: "hemiacetal",
+      label: `${alcohol} hemiacetal`,
+      ln: before.ln + LN10 * constant.log10,
+      errors: {
+        ...before.errors,
+        [`hydration ${key}`]: Math.min(hydration.sd, constant.sd),
+        [`term of ${alcohol}`]: own,
+      },
+      ligand: alcohol,
+      correction: `alcohol:${alcohol}`,
+    });
+  }
+  return { options, alcohols };
+}
+
+/** The charged open molecule beside the uncharged one, as the reference of its own hydrate. */
+function chargedReference(
+  compound: Compound,
+  site: CarbonylSite,
+  uncharged: ConstantEstimate,
+  conditions: Conditions,
+): { readonly state: ChargeState; readonly option: SiteOption; readonly hydration: ConstantEstimate } | undefined {
+  const acidity = siteAcidity(compound, site);
+  if (!acidity) return undefined;
+  const hydration = siteHydration(compound, inState(site, acidity.state), acidity.state, conditions);
+  if ("outside" in hydration) return undefined;
+  const ratio = openStateRatio(acidity, conditions.pH, {
+    uncharged: 1 + 10 ** uncharged.log10,
+    charged: 1 + 10 ** hydration.log10,
+  });
+  const option: SiteOption = { ...OPEN, ln: ratio.ln, errors: { [`acidity ${site.atom}`]: ratio.sd } };
+  return { state: acidity.state, option, hydration };
+}
+
+function adducts(site: CarbonylSite, key: string, hydration: ConstantEstimate, conditions: Conditions) {
+  const options: SiteOption[] = [];
+  const lines: DerivationLine[] = [];
+  for (const { compound, kind } of conditions.partners) {
+    const constant = adductConstant(site, hydration.log10, kind, compound, conditions.temperatureK);
+    if (!constant) continue;
+    const ready = readyShare(kind, compound, conditions.pH);
+    if (!(ready > 0)) continue;
+    options.push({
+      kind: kind.kind,
+      label: `${site.class === "formaldehyde" && kind.adduct === "imine" ? "hydroxymethylamine" : kind.adduct} with ${compound.name}`,
+      ln: LN10 * constant.log10 + Math.log(ready),
+      errors: { [`adduct ${key} ${compound.id}`]: constant.sd },
+      ligand: `with:${compound.id}`,
+      ...(kind.releasesWater && site.class !== "formaldehyde" ? { correction: "condensed" as const } : {}),
+    });
+    lines.push(constant.line);
+  }
+  return { options, lines };
+}
+
+/** Options of a site, or why its constant is out of reach. */
+export function siteOptions(compound: Compound, site: CarbonylSite, conditions: Conditions): SiteOptions | NoConstant {
+  const hydration = siteHydration(compound, site, "neutral", conditions);
+  if ("outside" in hydration) return hydration;
+  const key = String(site.atom);
+  const options: SiteOption[] = [OPEN, ...hydrates(site, key, hydration, OPEN, conditions)];
+  const ethers = hemiacetals(site, key, hydration, OPEN, conditions);
+  options.push(...ethers.options);
+  const lines: DerivationLine[] = [];
+  let shown = hydration;
+  let alcohols = ethers.alcohols;
+  const charged = chargedReference(compound, site, hydration, conditions);
+  if (charged) {
+    const written = inState(site, charged.state);
+    const own = `${key} ${charged.state}`;
+    const more = hemiacetals(written, own, charged.hydration, charged.option, conditions);
+    options.push(charged.option, ...hydrates(written, own, charged.hydration, charged.option, conditions));
+    options.push(...more.options);
+    if (charged.option.ln > 0) {
+      shown = charged.hydration;
+      alcohols = more.alcohols;
+    }
+    lines.push({
+      says: `At pH ${conditions.pH.toFixed(1)} the ${charged.state} and the uncharged form each count with their own constants`,
+      value: `log K ${charged.hydration.log10.toFixed(2)} and ${hydration.log10.toFixed(2)}`.replaceAll("-", "−"),
+    });
+  }
+  const ring = ringClosure(site, compound.smiles, conditions.temperatureK, conditions.correlationOnly);
+  if (ring) {
+    options.push({
+      kind: "cyclic hemiacetal",
+      label: ring.label,
+      ...(site.closure ? { smiles: site.closure.smiles } : {}),
+      ln: LN10 * ring.log10,
+      errors: { [`ring ${key}`]: ring.sd },
+    });
+    lines.push(ring.line);
+  }
+  const others = adducts(site, key, hydration, conditions);
+  options.push(...others.options);
+  lines.push(...others.lines);
+  const lead = { says: `${site.class}${shown.method === "measured" ? ", measured for this compound" : ""}` };
+  return {
+    site,
+    options,
+    constants: { site, hydration: shown, alcohols },
+    lines: [lead, ...shown.lines, ...lines, ...alcohols.flatMap(({ constant }) => constant.lines)],
+  };
+}

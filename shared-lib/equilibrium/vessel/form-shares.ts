@@ -1,0 +1,132 @@
+/**
+ * Shares of the forms of one carbonyl with central 95 % bounds. Every independent source of error moves all the constants that rest on
+ * it at once; the balance answers (implicit differentiation with the Jacobian of the solution), and the effects are added in quadrature on
+ * the logit of each share, so that bounds stay between 0 and 1.
+ */
+
+import type { FormShare, Interval } from "../../model/contract.ts";
+import { solveCholesky } from "../balance/linear.ts";
+import { gramFactor } from "../balance/solve-balance.ts";
+import type { Species } from "../forms/species.ts";
+import type { VesselEquilibrium } from "./equilibrium.ts";
+
+/** Two-sided 95 % point of the normal distribution. */
+export const Z95 = 1.959964;
+/** Forms below this share are left out of the list. */
+const NOTHING = 1e-12;
+
+type Solved = VesselEquilibrium & { readonly species: readonly Species[] };
+
+/** Sources of error over all species: for each, d log10 K of every species. */
+function sourcesOf(solved: Solved): Map<string, Float64Array> {
+  const sources = new Map<string, Float64Array>();
+  const add = (source: string, s: number, size: number): void => {
+    if (size === 0) return;
+    let effect = sources.get(source);
+    if (!effect) {
+      effect = new Float64Array(solved.solution.amounts.length);
+      sources.set(source, effect);
+    }
+    effect[s] = (effect[s] as number) + size;
+  };
+  solved.species.forEach((one, s) => {
+    for (const [source, size] of Object.entries(one.errors)) add(source, s, size);
+    for (const { name, count } of one.corrections)
+      add(`medium ${name}`, s, count * (solved.corrections.get(name)?.sd ?? 0));
+  });
+  return sources;
+}
+
+/** d ln amount of every species for one standard deviation of each source. */
+export function sensitivities(solved: Solved): readonly Float64Array[] {
+  const { system, solution } = solved;
+  const { components: n, nu } = system;
+  const gram = gramFactor(system, solution.amounts);
+  if (!gram) return [];
+  const answers: Float64Array[] = [];
+  for (const effect of sourcesOf(solved).values()) {
+    const b = new Float64Array(n);
+    for (let s = 0; s < effect.length; s++) {
+      const moved = (effect[s] as number) * Math.LN10 * (solution.amounts[s] as number);
+      if (moved === 0) continue;
+      for (let i = 0; i < n; i++) b[i] = (b[i] as number) - (nu[s * n + i] as number) * moved;
+    }
+    for (let i = 0; i < n; i++) b[i] = (b[i] as number) * (gram.scale[i] as number);
+    solveCholesky(gram.factor, n, b);
+    const answer = new Float64Array(effect.length);
+    for (let s = 0; s < effect.length; s++) {
+      let sum = (effect[s] as number) * Math.LN10;
+      for (let i = 0; i < n; i++) sum += (nu[s * n + i] as number) * (b[i] as number) * (gram.scale[i] as number);
+      answer[s] = sum;
+    }
+    answers.push(answer);
+  }
+  return answers;
+}
+
+interface Gathered {
+  readonly form: Omit<FormShare, "fraction">;
+  value: number;
+  readonly moves: Float64Array;
+}
+
+function logistic(x: number): number {
+  return x >= 0 ? 1 / (1 + Math.exp(-x)) : Math.exp(x) / (1 + Math.exp(x));
+}
+
+function bounded(one: Gathered, all: readonly Gathered[], total: number): Interval {
+  const value = one.value / total;
+  let rest = 0;
+  for (const other of all) if (other !== one) rest += other.value;
+  if (!(rest > 0) || !(one.value > 0)) return { value, low: value, high: value };
+  let variance = 0;
+  for (let k = 0; k < one.moves.length; k++) {
+    let moved = 0;
+    for (const other of all) if (other !== one) moved += other.moves[k] as number;
+    variance += ((one.moves[k] as number) / one.value - moved / rest) ** 2;
+  }
+  const logit = Math.log(one.value / rest);
+  const half = Z95 * Math.sqrt(variance);
+  return {
+    value,
+    low: Math.min(value, logistic(logit - half)),
+    high: Math.max(value, logistic(logit + half)),
+  };
+}
+
+/**
+ * Forms of a carbonyl whose sets (its sites, or the whole molecule) are `sets`; shares add up to 1, the free carbonyl first.
+ *
+ * @param moves from `sensitivities`, once for the vessel
+ */
+export function formShares(solved: Solved, sets: readonly number[], moves: readonly Float64Array[]): FormShare[] {
+  const gathered = new Map<string, Gathered>();
+  for (const set of sets) {
+    const total = (solved.system.totals[set] as number) * sets.length;
+    for (let s = solved.offsets[set] as number; s < (solved.offsets[set + 1] as number); s++) {
+      const one = solved.species[s] as Species;
+      const weight = (one.units * (solved.solution.amounts[s] as number)) / total;
+      for (const { share, ...form } of one.parts) {
+        const key = `${form.kind}|${form.label}`;
+        let into = gathered.get(key);
+        if (!into) {
+          const { smiles, ...bare } = form;
+          into = {
+            form: smiles === undefined ? bare : { ...bare, smiles },
+            value: 0,
+            moves: new Float64Array(moves.length),
+          };
+          gathered.set(key, into);
+        }
+        into.value += weight * share;
+        for (let k = 0; k < moves.length; k++)
+          into.moves[k] = (into.moves[k] as number) + weight * share * ((moves[k] as Float64Array)[s] as number);
+      }
+    }
+  }
+  const all = [...gathered.values()].filter((one) => one.value > NOTHING || one.form.kind === "free carbonyl");
+  const total = all.reduce((sum, one) => sum + one.value, 0);
+  return all
+    .sort((a, b) => Number(b.form.kind === "free carbonyl") - Number(a.form.kind === "free carbonyl"))
+    .map((one) => ({ ...one.form, fraction: bounded(one, all, total) }));
+}
