@@ -101,6 +101,24 @@ describe("hemiacetals in mixed media", () => {
     expect(10 ** hemiacetalFactor(half, "methanol").log10).toBeCloseTo(share, 9);
     expect(hemiacetalFactor(half, "ethanol").log10).toBe(Number.NEGATIVE_INFINITY);
   });
+  // Acetaldehyde at 25 °C: 0.5 per M with ethanol in dilute water (Clayden, Greeves, Warren, Organic Chemistry), 8–10 in neat ethanol (Meadows,
+  // Darwent, Trans. Faraday Soc. 1952, 48, 1015; recalled); with methanol 0.8 (recalled) and 15–20 (the same paper, recalled).
+  it.each([
+    ["ethanol", 9, 0.5],
+    ["methanol", 17, 0.8],
+  ])("carry the ratio in neat %s (%d) over to dilute water (%f per M)", (alcohol, neat, perMolar) => {
+    const dilute = compositionOf(
+      [
+        { solvent: "water", amount: 55 },
+        { solvent: alcohol, amount: 0.1 },
+      ],
+      298.15,
+    );
+    const molar = dilute.components.find(({ solvent }) => solvent.key === alcohol)?.molarity ?? 0;
+    const factor = hemiacetalFactor(dilute, alcohol);
+    const found = Math.log10(neat) + factor.log10 - Math.log10(molar);
+    expect(Math.abs(found - Math.log10(perMolar))).toBeLessThan(factor.sd);
+  });
   it("are up to twice as many where nothing else solvates a little alcohol", () => {
     const dilute = binary("methanol", "toluene", 0.02);
     const share = dilute.components.find(({ solvent }) => solvent.key === "methanol")?.volumeFraction ?? 0;
