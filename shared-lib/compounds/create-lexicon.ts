@@ -168,7 +168,9 @@ class CatalogueLexicon implements Lexicon {
     const listed = this.#listedAt(text, at);
     if (listed) return listed;
     const read = grammarNameAt(text, at);
-    return read && this.#fromStructure(read.smiles, text.slice(at, read.end), at, read.end, structures);
+    return read && !isMasked(text, read.end)
+      ? this.#fromStructure(read.smiles, text.slice(at, read.end), at, read.end, structures)
+      : undefined;
   }
 
   /** A compound from its structure; the catalogue's own where it holds it, so that both are one compound. */
@@ -257,17 +259,14 @@ function candidateEnds(text: string, at: number, words: number): number[] {
   return ends.reverse();
 }
 
+/** Behind a hyphen these begin another name or say nothing of the compound. */
+const NOT_PART = ["water", "methanol", "ethanol", "hexane", "toluene", "chloroform", "dichloromethane", "ether", "thf"];
+
 /** The name goes on into another word: "benzaldehyde oxime", "acetone-1,3-dicarboxylate", "formaldehyde-free". */
 function isMasked(text: string, end: number): boolean {
-  const next = text[end];
-  const after = plainText(text.slice(end, end + 2));
-  if (after[0] === "-" && isLetter(after[1]))
-    return (
-      !/^-(?:water|methanol|ethanol|free|d\d)/.test(plainText(text.slice(end, end + 10)).toLowerCase()) ||
-      /^-free/.test(plainText(text.slice(end, end + 6)).toLowerCase())
-    );
-  if (after[0] === "-" && isWordCharacter(after[1])) return true;
-  if (next !== " " && next !== "-") return false;
+  const after = plainText(text.slice(end, end + 18)).toLowerCase();
+  if (after[0] === "-" && isWordCharacter(after[1])) return !NOT_PART.some((word) => after.startsWith(word, 1));
+  if (after[0] !== " " && after[0] !== "-") return false;
   let i = end + 1;
   while (i < text.length && isLetter(text[i])) i++;
   return MASKING.has(text.slice(end + 1, i).toLowerCase());

@@ -122,12 +122,17 @@ function withProducts(molecule: Molecule, { oxygen, closureOxygen, ...site }: Pl
 }
 
 /**
- * One SMILES for a structure however it was written: atoms in the order of the library's canonical code. That code drops stereo read
- * without coordinates, so a SMILES with stereo keeps the library's own order.
+ * One SMILES for one constitution, whatever the order in which it was written: the toolkit's own writer follows the input's order, so
+ * it is given the molecule in the order of its canonical code. Stereo is dropped with the coordinates.
  */
-function canonicalSmiles(molecule: Molecule): string {
+function canonicalOf(molecule: Molecule): string {
+  return Molecule.fromIDCode(molecule.getIDCode(), false).toIsomericSmiles();
+}
+
+/** The same, but with stereo where it was written (then in the toolkit's own order): sugars differ by nothing else. */
+function canonicalWithStereo(molecule: Molecule): string {
   const own = molecule.toIsomericSmiles();
-  return /[@/\\]/.test(own) ? own : Molecule.fromIDCode(molecule.getIDCode(), false).toIsomericSmiles();
+  return /[@/\\]/.test(own) ? own : canonicalOf(molecule);
 }
 
 interface Parent {
@@ -206,19 +211,11 @@ function carbonylOf(
   return { carbonyl: { sites, ionisable: seen.ionisable } };
 }
 
-/**
- * One SMILES for one constitution, whatever the order in which it was written: the toolkit's own writer follows the input's order, so it is
- * given the molecule in the order of its canonical code. Stereocentres are dropped with the coordinates; no constant here depends on them.
- */
-function canonicalOf(molecule: Molecule): string {
-  return Molecule.fromIDCode(molecule.getIDCode(), false).toIsomericSmiles();
-}
-
 function read(smiles: string): StructureReading {
   const parsed = parse(smiles);
   if ("problem" in parsed) return { ok: false, ...parsed };
   try {
-    const canonicalSmiles = canonicalOf(parsed.molecule);
+    const canonicalSmiles = canonicalWithStereo(parsed.molecule);
     // Read again in canonical order: the sites' atoms are those of the SMILES that is given out.
     const molecule = Molecule.fromSmiles(canonicalSmiles, { noCoordinates: true });
     molecule.ensureHelperArrays(Molecule.cHelperRings);

@@ -52,7 +52,7 @@ export function compositionOf(parts: readonly MediumAmount[], temperatureK: numb
   return { components, volumeL };
 }
 
-/** What a mixture is to a carbonyl: water, alcohol, both or either beside others, or neither. Traces (below 2 % by volume) do not count. */
+/** What a mixture is to a carbonyl: water, alcohol, both or either beside others, or neither. Traces (below 5 % by volume) do not count. */
 export function mediumKind(composition: Composition): MediumKind {
   let water = 0;
   let alcohol = 0;
@@ -62,7 +62,7 @@ export function mediumKind(composition: Composition): MediumKind {
     else if (solvent.nucleophile === "alcohol") alcohol += volumeFraction;
     else other += volumeFraction;
   }
-  const trace = 0.02;
+  const trace = 0.05;
   if (composition.components.length === 0) return "unknown";
   if (water <= trace && alcohol <= trace) return "aprotic";
   if (alcohol <= trace && other <= trace) return "aqueous";

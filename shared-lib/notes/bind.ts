@@ -48,7 +48,6 @@ const LINKS = new Set([
   "liquid",
   "gaseous",
   "powdered",
-  "in",
   "total",
   "or",
   "about",
@@ -171,7 +170,8 @@ function leftOf(items: readonly Item[], name: number, taken: ReadonlySet<number>
     else if (isMark(item, ")", "]")) {
       const open = openOf(items, i);
       if (open === undefined || open + 1 === i) break;
-      // "1.51 g (10 mmol) of X": a bracket of amounts only, with an amount before it.
+      // "1.51 g (10 mmol) of X": a bracket of amounts only, with an amount before it. Without one it is the bracket of the name before it.
+      if (!isAmount(items[open - 1])) break;
       const within = items.slice(open + 1, i);
       const pure = within.every(
         (inner) =>

@@ -109,7 +109,9 @@ function isCharge(mention: Mention, amounts: readonly Quantity[]): boolean {
 }
 
 function needsAqueous(mention: Mention, amounts: readonly Quantity[]): boolean {
-  const dissolved = amounts.some((amount) => amount.of === "concentration" || (amount.of === "assay" && amount.base < 0.85));
+  const dissolved = amounts.some(
+    (amount) => amount.of === "concentration" || (amount.of === "assay" && amount.base < 0.85),
+  );
   return (
     dissolved && (mention.compound?.tags.some((tag) => ["acid", "strong acid", "base", "salt"].includes(tag)) ?? false)
   );
@@ -165,7 +167,9 @@ function addMedia(draft: Draft, reading: BlockReading, block: Block, step: numbe
 function addAqueous(draft: Draft, charge: Charge, mention: Mention): void {
   const volume = charge.amounts.find((amount) => amount.of === "volume");
   if (mention.carbonyl || !volume || charge.dissolvedIn?.[0]?.solvent !== "water") return;
-  const parts: MediumPhrase["parts"] = [{ solvent: "water", words: mention.text, basis: "volume", volumeL: volume.base }];
+  const parts: MediumPhrase["parts"] = [
+    { solvent: "water", words: mention.text, basis: "volume", volumeL: volume.base },
+  ];
   const { start, end } = mention;
   draft.media.push({ start, end, step: charge.step, kind: "aqueous", parts, volumeL: volume.base });
   draft.solvents.push("water");

@@ -1,5 +1,6 @@
 /** Reagent, solvent, product or other; and where the work-up begins. */
 
+import { solventByKey } from "../media/solvents.ts";
 import type { Role } from "../model/contract.ts";
 import type { Binding } from "./bind.ts";
 import type { Block } from "./blocks.ts";
@@ -164,10 +165,16 @@ function besideSolvent(items: readonly Item[], name: number): boolean {
   );
 }
 
+function adds(item: NameItem): boolean {
+  const { solvent } = item.match.compound;
+  return solvent !== undefined && solventByKey(solvent)?.nucleophile !== "none";
+}
+
 function solventRole(items: readonly Item[], name: number, item: NameItem, binding: Binding | undefined): Role {
   const { compound } = item.match;
   if (compound.buffer) return "solvent";
-  if (hasMoles(binding)) return "reagent";
+  // Water and alcohols are medium whatever they are counted in; of the others, moles make a reagent.
+  if (hasMoles(binding) && !adds(item)) return "reagent";
   if (standsIn(items, name) || besideSolvent(items, name)) return "solvent";
   const measured = binding?.amounts ?? [];
   const volume = measured.find((amount) => amount.of === "volume");

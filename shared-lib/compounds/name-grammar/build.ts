@@ -15,7 +15,13 @@ export interface Group {
 }
 
 export function groupOf(piece: Piece): Group {
-  return { molecule: piece.molecule, order: piece.order, locants: piece.locants, attach: 0, ...(piece.free === undefined ? {} : { free: piece.free }) };
+  return {
+    molecule: piece.molecule,
+    order: piece.order,
+    locants: piece.locants,
+    attach: 0,
+    ...(piece.free === undefined ? {} : { free: piece.free }),
+  };
 }
 
 /** Hangs `group` on `atom` of `molecule` (changed in place). */
@@ -51,7 +57,13 @@ export function saturate(molecule: Molecule, atoms: readonly number[]): boolean 
   const whole = new Set(rings.flat());
   const loose = molecule.atoms.flatMap((atom, index) => (atom.aromatic && !whole.has(index) ? [index] : []));
   for (const index of loose) (molecule.atoms[index] as { aromatic: boolean }).aromatic = false;
-  const open = new Set(loose.filter((index) => molecule.atoms[index]?.element === "C" || (molecule.atoms[index]?.element === "N" && molecule.neighbours(index).length === 2)));
+  const open = new Set(
+    loose.filter(
+      (index) =>
+        molecule.atoms[index]?.element === "C" ||
+        (molecule.atoms[index]?.element === "N" && molecule.neighbours(index).length === 2),
+    ),
+  );
   for (const index of loose) {
     if (!open.has(index)) continue;
     const partner = molecule.neighbours(index).find(({ atom }) => open.has(atom));

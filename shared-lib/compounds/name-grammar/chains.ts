@@ -49,7 +49,9 @@ function carbons(count: number, ring: boolean): { molecule: Molecule; locants: M
 /** "bicyclo[3.1.1]": bridgeheads 1 and 1 + a + 1, the bridges in the order of their lengths. */
 function bicycle(text: string, at: number): { sizes: readonly [number, number, number]; end: number } | undefined {
   const found = /^bicyclo\[(\d{1,2})\.(\d{1,2})\.(\d{1,2})\]/.exec(text.slice(at, at + 22));
-  return found ? { sizes: [Number(found[1]), Number(found[2]), Number(found[3])], end: at + found[0].length } : undefined;
+  return found
+    ? { sizes: [Number(found[1]), Number(found[2]), Number(found[3])], end: at + found[0].length }
+    : undefined;
 }
 
 function bicyclic([a, b, c]: readonly [number, number, number]): { molecule: Molecule; locants: Map<string, number> } {
@@ -67,7 +69,11 @@ function bicyclic([a, b, c]: readonly [number, number, number]): { molecule: Mol
 }
 
 /** Unsaturation at `at`: "an", "en", "-2-en", "a-2,4-dien", "yn". */
-function unsaturation(text: string, at: number, leading: readonly string[] | undefined): { bonds: { locant: string; order: 2 | 3 }[]; end: number; usedLeading: boolean } | undefined {
+function unsaturation(
+  text: string,
+  at: number,
+  leading: readonly string[] | undefined,
+): { bonds: { locant: string; order: 2 | 3 }[]; end: number; usedLeading: boolean } | undefined {
   if (/^a(?:di|tri)(?:one|al|ol)/.test(text.slice(at, at + 7))) return { bonds: [], end: at + 1, usedLeading: false };
   if (text.startsWith("an", at)) return { bonds: [], end: at + 2, usedLeading: false };
   const found = /^(?:a?-((?:\d{1,2})(?:,\d{1,2})*)-|a)?(di|tri)?(en|yn)/.exec(text.slice(at, at + 20));
@@ -99,6 +105,16 @@ export function chainsAt(text: string, at: number, leading: readonly string[] | 
       if (!bond) return [];
       bond.order = order;
     }
-    return [{ molecule, locants, ...(count === 1 ? { free: 0 } : {}), ring: ring || bridged !== undefined, length: count, end: found.end, usedLeading: found.usedLeading }];
+    return [
+      {
+        molecule,
+        locants,
+        ...(count === 1 ? { free: 0 } : {}),
+        ring: ring || bridged !== undefined,
+        length: count,
+        end: found.end,
+        usedLeading: found.usedLeading,
+      },
+    ];
   });
 }

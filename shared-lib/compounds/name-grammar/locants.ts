@@ -1,6 +1,18 @@
 /** Locants, multiplying prefixes and the parts of a name that carry no constitution (stereo, indicated hydrogen). */
 
-const ORTHO: Readonly<Record<string, string>> = { o: "2", m: "3", p: "4", ortho: "2", meta: "3", para: "4", "α": "alpha", "β": "beta", "ω": "omega", alpha: "alpha", beta: "beta" };
+const ORTHO: Readonly<Record<string, string>> = {
+  o: "2",
+  m: "3",
+  p: "4",
+  ortho: "2",
+  meta: "3",
+  para: "4",
+  α: "alpha",
+  β: "beta",
+  ω: "omega",
+  alpha: "alpha",
+  beta: "beta",
+};
 
 export interface LocantList {
   readonly locants: readonly string[];
@@ -9,7 +21,10 @@ export interface LocantList {
 }
 
 function oneLocant(text: string, at: number): { locant: string; end: number } | undefined {
-  const found = /^(?:(\d{1,2}[a-g]?'{0,2})(?:\(\d{1,2}h\))?|(n'{0,2})(?=[-,])|(ortho|meta|para|alpha|beta|[omp]|α|β|ω)(?=[-,]))/.exec(text.slice(at, at + 16));
+  const found =
+    /^(?:(\d{1,2}[a-g]?'{0,2})(?:\(\d{1,2}h\))?|(n'{0,2})(?=[-,])|(ortho|meta|para|alpha|beta|[omp]|α|β|ω)(?=[-,]))/.exec(
+      text.slice(at, at + 16),
+    );
   if (!found) return undefined;
   const word = found[3];
   return { locant: word ? (ORTHO[word] as string) : (found[1] ?? found[2] ?? ""), end: at + found[0].length };
@@ -43,12 +58,16 @@ const MULTIPLIERS: readonly (readonly [string, number])[] = [
 
 /** Multiplying prefixes that stand at `at`, and none. */
 export function multipliersAt(text: string, at: number): readonly { readonly count: number; readonly end: number }[] {
-  const found = MULTIPLIERS.filter(([word]) => text.startsWith(word, at)).map(([word, count]) => ({ count, end: at + word.length }));
+  const found = MULTIPLIERS.filter(([word]) => text.startsWith(word, at)).map(([word, count]) => ({
+    count,
+    end: at + word.length,
+  }));
   return [...found, { count: 1, end: at }];
 }
 
 /** What says nothing of the constitution: "(e)-", "(1r,5s)-", "trans-", "(±)-", "1h-". */
-const SILENT = /^(?:\((?:[0-9a-g]{0,3}[rsez](?:,[0-9a-g]{0,3}[rsez*]{1,2})*|rs|sr|\+|-|\+\/-|±|\+-|d|l|dl|[rs]\*|e\/z|racemic|cis|trans)\)-?|(?:trans|cis|rac|dl|d|l|meso|exo|endo|syn|anti|[ez])-|\d{1,2}h-)/;
+const SILENT =
+  /^(?:\((?:[0-9a-g]{0,3}[rsez](?:,[0-9a-g]{0,3}[rsez*]{1,2})*|rs|sr|\+|-|\+\/-|±|\+-|d|l|dl|[rs]\*|e\/z|racemic|cis|trans)\)-?|(?:trans|cis|rac|dl|d|l|meso|exo|endo|syn|anti|[ez])-|\d{1,2}h-)/;
 
 /** Offset behind everything silent that stands at `at`. */
 export function skipSilent(text: string, at: number): number {

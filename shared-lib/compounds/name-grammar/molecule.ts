@@ -40,7 +40,9 @@ export class Molecule {
   }
 
   neighbours(index: number): { readonly atom: number; readonly bond: NameBond }[] {
-    return this.bonds.flatMap((bond) => (bond.a === index ? [{ atom: bond.b, bond }] : bond.b === index ? [{ atom: bond.a, bond }] : []));
+    return this.bonds.flatMap((bond) =>
+      bond.a === index ? [{ atom: bond.b, bond }] : bond.b === index ? [{ atom: bond.a, bond }] : [],
+    );
   }
 
   bondBetween(a: number, b: number): NameBond | undefined {
@@ -79,8 +81,14 @@ export function readFragment(smiles: string): Molecule {
       const close = smiles.indexOf("]", i);
       const body = smiles.slice(i + 1, close);
       const symbol = /^[A-Z][a-z]?|^[a-z]/.exec(body)?.[0] ?? "";
-      const element = symbol.length === 2 && !TWO_LETTERS.has(symbol) ? symbol[0] as string : symbol;
-      place(molecule.addAtom(element.toUpperCase() === element || TWO_LETTERS.has(element) ? element : element.toUpperCase(), element.toLowerCase() === element, body.endsWith("+") ? 1 : body.endsWith("-") ? -1 : 0));
+      const element = symbol.length === 2 && !TWO_LETTERS.has(symbol) ? (symbol[0] as string) : symbol;
+      place(
+        molecule.addAtom(
+          element.toUpperCase() === element || TWO_LETTERS.has(element) ? element : element.toUpperCase(),
+          element.toLowerCase() === element,
+          body.endsWith("+") ? 1 : body.endsWith("-") ? -1 : 0,
+        ),
+      );
       i = close;
     } else if (TWO_LETTERS.has(smiles.slice(i, i + 2))) {
       place(molecule.addAtom(smiles.slice(i, i + 2)));
@@ -120,7 +128,12 @@ function pyrroleNitrogens(molecule: Molecule): ReadonlySet<number> {
     if (!atoms.every((atom) => atom.aromatic)) continue;
     const donates = ring.some((index, i) => {
       const element = atoms[i]?.element;
-      return element === "O" || element === "S" || (element === "N" && molecule.neighbours(index).length > 2) || found.has(index);
+      return (
+        element === "O" ||
+        element === "S" ||
+        (element === "N" && molecule.neighbours(index).length > 2) ||
+        found.has(index)
+      );
     });
     if (donates) continue;
     const first = ring.filter((index) => molecule.atoms[index]?.element === "N").sort((a, b) => a - b)[0];
@@ -181,7 +194,8 @@ export function writeSmiles(molecule: Molecule): string {
     const branches = molecule.neighbours(index).filter(({ atom, bond }) => treeBonds.has(bond) && atom !== from);
     const texts = branches.map(({ atom, bond }) => {
       const both = molecule.atoms[index]?.aromatic && molecule.atoms[atom]?.aromatic;
-      const joint = both && bond.order === 1 && !inSameRing(molecule, index, atom) ? "-" : both ? "" : BOND_TEXT[bond.order];
+      const joint =
+        both && bond.order === 1 && !inSameRing(molecule, index, atom) ? "-" : both ? "" : BOND_TEXT[bond.order];
       return `${joint}${write(atom, index)}`;
     });
     return `${atomText(molecule, index)}${ringText}${texts.map((text, i) => (i < texts.length - 1 ? `(${text})` : text)).join("")}`;

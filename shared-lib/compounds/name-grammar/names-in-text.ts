@@ -5,8 +5,10 @@ import { LONGEST_NAME, readName } from "./parse.ts";
 
 /** How the name of an aldehyde or ketone ends, and how one of its esters, acids, salts and hydrates does. */
 const CARBONYL_END = /(?:aldehyde|[dnthpxym]al|one|phenone|furfural|piperonal|vanillin|benzil|benzoin|isatin)s?$/;
-const OTHER_END = /(?:acid|ate|ester|ketone|hydrochloride|hydrate|hcl|nitrile|amide|amine|ol|phenol|aniline|toluene|benzene|anisole)s?$/;
-const INSIDE = /formyl|oxo|oyl|acetyl|keto|acetoacet|pyruv|glyoxyl|levulin|carbonyl|ketone|aldehyde|one hydr|anone|butyryl|propionyl/;
+const OTHER_END =
+  /(?:acid|ate|ester|ketone|hydrochloride|hydrate|hcl|nitrile|amide|amine|ol|phenol|aniline|toluene|benzene|anisole)s?$/;
+const INSIDE =
+  /formyl|oxo|oyl|acetyl|keto|acetoacet|pyruv|glyoxyl|levulin|carbonyl|ketone|aldehyde|one hydr|anone|butyryl|propionyl/;
 
 const MOST_WORDS = 4;
 const MOST_CACHED = 4000;

@@ -57,7 +57,13 @@ class Reader {
     for (const { count, end } of multipliersAt(text, start)) {
       if (count > 1 && list && text.startsWith("hydro", end)) {
         const next = text[end + 5] === "-" ? end + 6 : end + 5;
-        const result = this.walk(text, next, { ...prefixes, hydro: [...prefixes.hydro, ...list.locants] }, depth, finish);
+        const result = this.walk(
+          text,
+          next,
+          { ...prefixes, hydro: [...prefixes.hydro, ...list.locants] },
+          depth,
+          finish,
+        );
         if (result !== undefined) return result;
       }
       if (list && list.locants.length !== count) continue;
@@ -87,21 +93,33 @@ class Reader {
   }
 
   /** "methyl" + "thio", "benzyloxy" + "carbonyl" + "amino": a group on the free atom of the one whose name follows. */
-  #compounds(text: string, first: { group: Group; end: number }, count: number, level: number, found: { group: Group; end: number }[]): void {
+  #compounds(
+    text: string,
+    first: { group: Group; end: number },
+    count: number,
+    level: number,
+    found: { group: Group; end: number }[],
+  ): void {
     if (level > 3 || first.group.order !== 1 || ++this.#steps > MOST_STEPS) return;
     const at = text[first.end] === "-" && text[first.end - 1] === ")" ? first.end + 1 : first.end;
     for (const piece of piecesAt(grammarTables().groups, text, at)) {
       const group = onFree(groupOf(piece), first.group, count);
       if (!group) continue;
       // What was free is taken now; a tertiary amino keeps its atom.
-      const next = { group: { ...group, ...(piece.name === "amino" ? {} : { free: undefined }) } as Group, end: at + piece.name.length };
+      const next = {
+        group: { ...group, ...(piece.name === "amino" ? {} : { free: undefined }) } as Group,
+        end: at + piece.name.length,
+      };
       found.push(next);
       this.#compounds(text, next, 1, level + 1, found);
     }
   }
 
   #plainGroupsAt(text: string, at: number, depth: number): { group: Group; end: number }[] {
-    const found = piecesAt(grammarTables().groups, text, at).map((piece) => ({ group: groupOf(piece), end: at + piece.name.length }));
+    const found = piecesAt(grammarTables().groups, text, at).map((piece) => ({
+      group: groupOf(piece),
+      end: at + piece.name.length,
+    }));
     for (const piece of piecesAt(grammarTables().parents, text, skipSilent(text, at))) {
       const behind = skipSilent(text, at) + piece.name.length;
       const yl = /^(?:-(\d{1,2}[a-g]?)-?)?yl(?![a-z]*o[a-z]*ne)/.exec(text.slice(behind, behind + 10));
@@ -120,7 +138,11 @@ class Reader {
   substituent(text: string, depth: number): Group | undefined {
     return this.walk<Group>(text, 0, { placed: [], hydro: [] }, depth, (at, prefixes, leading) => {
       const from = leading ? at : skipSilent(text, at);
-      for (const { group, end } of this.groupsAt(leading ? `${leading.join(",")}-${text.slice(from)}` : text, leading ? 0 : from, depth)) {
+      for (const { group, end } of this.groupsAt(
+        leading ? `${leading.join(",")}-${text.slice(from)}` : text,
+        leading ? 0 : from,
+        depth,
+      )) {
         if (end !== (leading ? leading.join(",").length + 1 + text.length - from : text.length)) continue;
         const molecule = group.molecule.copy();
         if (place(molecule, group, prefixes)) return { ...group, molecule };
@@ -156,24 +178,43 @@ class Reader {
     return true;
   }
 
-  #systematic(text: string, at: number, prefixes: Prefixes, leading: readonly string[] | undefined): Molecule | undefined {
+  #systematic(
+    text: string,
+    at: number,
+    prefixes: Prefixes,
+    leading: readonly string[] | undefined,
+  ): Molecule | undefined {
     for (const piece of piecesAt(grammarTables().parents, text, at)) {
       const molecule = this.#withSuffix(text.slice(at + piece.name.length), piece, prefixes, leading, undefined);
       if (molecule) return molecule;
     }
     for (const chain of chainsAt(text, at, leading)) {
       const rest = chain.usedLeading ? undefined : leading;
-      const molecule = this.#withSuffix(text.slice(chain.end), chain, prefixes, rest, chain.ring ? undefined : chain.length);
+      const molecule = this.#withSuffix(
+        text.slice(chain.end),
+        chain,
+        prefixes,
+        rest,
+        chain.ring ? undefined : chain.length,
+      );
       if (molecule) return molecule;
     }
     return undefined;
   }
 
-  #withSuffix(rest: string, parent: Frame, prefixes: Prefixes, leading: readonly string[] | undefined, chainLength: number | undefined): Molecule | undefined {
+  #withSuffix(
+    rest: string,
+    parent: Frame,
+    prefixes: Prefixes,
+    leading: readonly string[] | undefined,
+    chainLength: number | undefined,
+  ): Molecule | undefined {
     const tail = rest.startsWith("e-") || rest === "e" || /^e[a-z]/.test(rest) ? rest.slice(1) : rest;
     if (tail === "" && !leading && this.#esters.length === 0) {
       const molecule = parent.molecule.copy();
-      return hydrogenate(molecule, parent, prefixes.hydro, []) && place(molecule, { ...parent, molecule }, prefixes) ? molecule : undefined;
+      return hydrogenate(molecule, parent, prefixes.hydro, []) && place(molecule, { ...parent, molecule }, prefixes)
+        ? molecule
+        : undefined;
     }
     const locants = tail.startsWith("-") ? locantsAt(tail, 1) : undefined;
     const added = locants ? /\((\d{1,2})h\)-?$/.exec(tail.slice(0, locants.end))?.[1] : undefined;
@@ -203,7 +244,12 @@ function hydrogenate(molecule: Molecule, parent: Frame, hydro: readonly string[]
 }
 
 /** Atoms that take the suffix. */
-function placesOf(suffix: Suffix, locants: readonly string[] | undefined, parent: Frame, chainLength: number | undefined): number[] | undefined {
+function placesOf(
+  suffix: Suffix,
+  locants: readonly string[] | undefined,
+  parent: Frame,
+  chainLength: number | undefined,
+): number[] | undefined {
   if (locants) {
     if (locants.length !== suffix.count) return undefined;
     const atoms = locants.map((locant) => parent.locants.get(locant));
@@ -214,7 +260,8 @@ function placesOf(suffix: Suffix, locants: readonly string[] | undefined, parent
     return suffix.count === 2 ? [0, chainLength - 1] : [0];
   }
   if (suffix.count !== 1) return undefined;
-  if (chainLength === undefined) return parent.free !== undefined ? [parent.free] : isPlainRing(parent.molecule) ? [0] : undefined;
+  if (chainLength === undefined)
+    return parent.free !== undefined ? [parent.free] : isPlainRing(parent.molecule) ? [0] : undefined;
   // Methanone, ethanone, propanone and butanone need no locant.
   if (chainLength <= 2) return [0];
   return suffix.word === "one" && chainLength <= 4 ? [1] : undefined;
@@ -222,13 +269,21 @@ function placesOf(suffix: Suffix, locants: readonly string[] | undefined, parent
 
 /** A ring of one element whose positions are all alike. */
 function isPlainRing(molecule: Molecule): boolean {
-  return molecule.atoms.every((atom, index) => atom.element === "C" && molecule.neighbours(index).length === 2) && (molecule.bonds.every((bond) => bond.order === 1) || molecule.bonds.filter((bond) => bond.order === 2).length === 1);
+  return (
+    molecule.atoms.every((atom, index) => atom.element === "C" && molecule.neighbours(index).length === 2) &&
+    (molecule.bonds.every((bond) => bond.order === 1) || molecule.bonds.filter((bond) => bond.order === 2).length === 1)
+  );
 }
 
 /** Hangs the prefixes on their places. @returns false when one has none */
 function place(molecule: Molecule, frame: Frame, prefixes: Prefixes): boolean {
   for (const { locants, count, group } of prefixes.placed) {
-    const atoms = locants ? locants.map((locant) => frame.locants.get(locant) ?? frame.locants.get(`${locant}'`) ?? nitrogenOf(locant, molecule, frame)) : Array.from({ length: count }, () => frame.free);
+    const atoms = locants
+      ? locants.map(
+          (locant) =>
+            frame.locants.get(locant) ?? frame.locants.get(`${locant}'`) ?? nitrogenOf(locant, molecule, frame),
+        )
+      : Array.from({ length: count }, () => frame.free);
     if (atoms.some((atom) => atom === undefined)) return false;
     for (const atom of atoms) hang(molecule, atom as number, group);
   }
@@ -239,7 +294,9 @@ function place(molecule: Molecule, frame: Frame, prefixes: Prefixes): boolean {
 function nitrogenOf(locant: string, molecule: Molecule, frame: Frame): number | undefined {
   if (locant !== "n") return undefined;
   const numbered = [...frame.locants.values()];
-  const nitrogens = molecule.atoms.flatMap((atom, index) => (atom.element === "N" && (numbered.includes(index) || numbered.length === 0) ? [index] : []));
+  const nitrogens = molecule.atoms.flatMap((atom, index) =>
+    atom.element === "N" && (numbered.includes(index) || numbered.length === 0) ? [index] : [],
+  );
   return nitrogens.length === 1 ? nitrogens[0] : undefined;
 }
 

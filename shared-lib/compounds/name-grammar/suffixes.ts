@@ -24,7 +24,9 @@ function acid(molecule: Molecule, atom: number): readonly number[] {
 }
 
 /** A new carbon on the atom, then `add` on it. */
-function onCarbon(add: (molecule: Molecule, atom: number) => readonly number[]): (molecule: Molecule, atom: number) => readonly number[] {
+function onCarbon(
+  add: (molecule: Molecule, atom: number) => readonly number[],
+): (molecule: Molecule, atom: number) => readonly number[] {
   return (molecule, atom) => {
     const carbon = molecule.addAtom("C");
     molecule.addBond(atom, carbon);

@@ -18,7 +18,11 @@ export interface Piece {
 }
 
 type Row = readonly [name: string, smiles: string, locants: string, free: string];
-const RAW = raw as unknown as { readonly parents: readonly Row[]; readonly groups: readonly Row[]; readonly retained: readonly Row[] };
+const RAW = raw as unknown as {
+  readonly parents: readonly Row[];
+  readonly groups: readonly Row[];
+  readonly retained: readonly Row[];
+};
 
 function pieceOf([name, smiles, locants, free]: Row): Piece {
   const double = smiles.startsWith("=");
@@ -36,7 +40,9 @@ function acidOxygensOf(molecule: Molecule): readonly number[] {
   return molecule.atoms.flatMap((atom, index) => {
     const [only, ...more] = molecule.neighbours(index);
     if (atom.element !== "O" || !only || more.length > 0 || only.bond.order !== 1) return [];
-    const onAcid = molecule.neighbours(only.atom).some(({ atom: other, bond }) => bond.order === 2 && molecule.atoms[other]?.element === "O");
+    const onAcid = molecule
+      .neighbours(only.atom)
+      .some(({ atom: other, bond }) => bond.order === 2 && molecule.atoms[other]?.element === "O");
     return onAcid ? [index] : [];
   });
 }
@@ -46,7 +52,15 @@ function withEster(rows: readonly Row[]): readonly Piece[] {
   return rows.flatMap((row) => {
     const piece = pieceOf(row);
     if (!piece.name.endsWith("ic acid")) return [piece];
-    return [piece, { ...piece, name: piece.name.replace(/ic acid$/, "ate"), ester: true, acidOxygens: acidOxygensOf(piece.molecule) }];
+    return [
+      piece,
+      {
+        ...piece,
+        name: piece.name.replace(/ic acid$/, "ate"),
+        ester: true,
+        acidOxygens: acidOxygensOf(piece.molecule),
+      },
+    ];
   });
 }
 
@@ -73,7 +87,11 @@ let tables: GrammarTables | undefined;
 export function grammarTables(): GrammarTables {
   // "!" keeps a name out that is ambiguous without a locant (tolyl, naphthoyl).
   const pieces = (rows: readonly Row[]): Piece[] => rows.filter((row) => row[1] !== "!").map(pieceOf);
-  tables ??= { parents: index(pieces(RAW.parents)), groups: index(pieces(RAW.groups)), retained: index(withEster(RAW.retained)) };
+  tables ??= {
+    parents: index(pieces(RAW.parents)),
+    groups: index(pieces(RAW.groups)),
+    retained: index(withEster(RAW.retained)),
+  };
   return tables;
 }
 
