@@ -51,13 +51,15 @@ describe("against another toolkit", () => {
     const pattern = other.get_qmol(SITE);
     for (const smiles of STRUCTURES) {
       if (smiles === QUINONE) continue;
-      const molecule = other.get_mol(smiles) as OtherMolecule;
+      const reading = toolkit.read(smiles);
+      if (!reading.ok) throw new Error(smiles);
+      // Atoms are counted in the SMILES that the toolkit gives out.
+      const molecule = other.get_mol(reading.canonicalSmiles) as OtherMolecule;
       const matches = JSON.parse(molecule.get_substruct_matches(pattern)) as { atoms?: number[] }[];
       const expected = (Array.isArray(matches) ? matches : [])
         .flatMap((match) => match.atoms ?? [])
         .sort((a, b) => a - b);
-      const reading = toolkit.read(smiles);
-      const found = reading.ok ? (reading.carbonyl?.sites.map((site) => site.atom) ?? []) : undefined;
+      const found = (reading.carbonyl?.sites.map((site) => site.atom) ?? []).sort((a, b) => a - b);
       expect(found, smiles).toEqual(expected);
       molecule.delete();
     }
