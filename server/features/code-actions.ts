@@ -42,6 +42,7 @@ function quickFixes(note: OpenNote, params: CodeActionParams, options: { readonl
   const here = note.analysis.findings.flatMap((finding, index) =>
     overlaps(finding, span) ? [{ finding, diagnostic: diagnostics[index] as Diagnostic }] : [],
   );
+  here.sort((a, b) => (a.diagnostic.severity ?? 0) - (b.diagnostic.severity ?? 0));
   const fixes = here.flatMap(({ finding, diagnostic }) =>
     finding.fixes.map((fix, rank) => ({
       title: fix.title,

@@ -116,6 +116,13 @@ function solventsAt(contents: Contents, water: number, litres: number): Contents
   return [...molesOf("water", water), ...organic];
 }
 
+/** Says what the rest is where the note has water alone. */
+export function waterLabel(contents: Contents): string {
+  const { components } = compositionOf(contents.solvents, contents.temperatureK);
+  const alone = components.every((component) => component.solvent.nucleophile === "water");
+  return alone ? `${AXES.water.label.replace(")", `, the rest ${OTHER_SOLVENT})`)}` : AXES.water.label;
+}
+
 /** Six half-lives, where the approach is known. */
 export function timeSpan(forms: CarbonylForms | undefined, count: number): number[] {
   const halfLife = forms?.time?.halfLife.value;

@@ -9,7 +9,7 @@ import { celsius, percent } from "../../shared-lib/report/card/share-words.ts";
 import type { OpenNote } from "../notes.ts";
 import type { Curve, CurveAxis, Curves, CurvesRequest } from "../protocol.ts";
 import { positionOf } from "../ranges.ts";
-import { AXES, applyAxis, controlsOf, type Stand, standOf, timeSpan } from "./curve-axes.ts";
+import { AXES, applyAxis, controlsOf, type Stand, standOf, timeSpan, waterLabel } from "./curve-axes.ts";
 import { carbonylMentionAt } from "./hover.ts";
 
 const POINTS = 41;
@@ -32,7 +32,7 @@ export function curvesOf(note: OpenNote, request: CurvesRequest): Curves | undef
   return {
     title: named?.name ?? "",
     axis,
-    axisLabel: AXES[axis].label,
+    axisLabel: axis === "water" ? waterLabel(moment.contents) : AXES[axis].label,
     x,
     curves: collect(x.map((value) => pointAt(moment.contents, row, changed, axis, value))),
     here: changed[axis],
@@ -106,11 +106,18 @@ function timelineOf(note: OpenNote, step: number, mention: number): Curves["time
     .filter((moment) => moment.step === step)
     .map((moment: SpeciatedMoment) => {
       const event = note.analysis.reading.events[moment.event];
-      const words = event ? text.slice(event.start, Math.min(event.end, event.start + 60)).replaceAll(/\s+/g, " ") : "";
+      const words = event ? shortened(text.slice(event.start, event.end)) : "";
       const forms = formsAt(moment, mention);
       const free = forms && forms.outside === undefined ? forms.free.value : undefined;
       const state = free === undefined ? "" : `, ${percent(free)} free`;
       const says = `${words} (${celsius(moment.contents.temperatureK)}${state})`;
       return { line: positionOf(note.document, moment.offset).line, says, ...(free === undefined ? {} : { free }) };
     });
+}
+
+const LONGEST_WORDS = 60;
+
+function shortened(words: string): string {
+  const line = words.replaceAll(/\s+/g, " ");
+  return line.length <= LONGEST_WORDS ? line : `${line.slice(0, LONGEST_WORDS - 1)}…`;
 }

@@ -28,12 +28,22 @@ byId("reset").addEventListener("click", () => {
 });
 byId("save-csv").addEventListener("click", () => save("forms.csv", current && csvOf(current)));
 byId("save-svg").addEventListener("click", () => save("forms.svg", current && svgOf(current)));
-byId("save-png").addEventListener("click", () => {
-  const canvas = document.querySelector<HTMLCanvasElement>("#plot canvas");
-  canvas?.toBlob(async (blob) => {
-    if (blob) host.postMessage({ kind: "save", name: "forms.png", data: new Uint8Array(await blob.arrayBuffer()) });
+byId("save-png").addEventListener("click", () => current && savePng(svgOf(current)));
+
+/** The same picture as the SVG, at twice its size. */
+function savePng(svg: string): void {
+  const image = new Image();
+  image.addEventListener("load", () => {
+    const canvas = document.createElement("canvas");
+    canvas.width = image.width * 2;
+    canvas.height = image.height * 2;
+    canvas.getContext("2d")?.drawImage(image, 0, 0, canvas.width, canvas.height);
+    canvas.toBlob(async (blob) => {
+      if (blob) host.postMessage({ kind: "save", name: "forms.png", data: new Uint8Array(await blob.arrayBuffer()) });
+    });
   });
-});
+  image.src = `data:image/svg+xml;charset=utf-8,${encodeURIComponent(svg)}`;
+}
 
 function save(name: string, text: string | undefined): void {
   if (text !== undefined) host.postMessage({ kind: "save", name, data: new TextEncoder().encode(text) });
