@@ -56,6 +56,14 @@ function waterSaturation(row: TableRow, molarMass: number): number | undefined {
   return fraction < HIGHEST_SATURATION ? Number(fraction.toPrecision(3)) : undefined;
 }
 
+function splitRange(row: TableRow): [number, number] | undefined {
+  const cell = row.cells.splits_C ?? "";
+  if (cell === "") return undefined;
+  const [from = Number.NaN, to = Number.NaN] = cell.split(":").map(Number);
+  if (!(from < to)) throw new Error(`${row.place}: splits_C must be written from:to in °C, not "${cell}"`);
+  return [from, to];
+}
+
 async function solventRows() {
   const columns = [
     "key",
@@ -100,6 +108,7 @@ async function solventRows() {
       weaklySolvating: !/[NOPS]/i.test(structure.formula.replace(/[A-Z][a-z]/g, "")),
       bottleWater: numberIn(row, "bottle_water"),
       miscible: row.cells.miscible === "yes",
+      splits: splitRange(row),
       waterSaturation: waterSaturation(row, molarMass),
       sdLnWaterActivity: optionalNumber(row, "sd_ln_aw") ?? 0.3,
       azeotrope: row.cells.azeotrope || undefined,

@@ -136,6 +136,18 @@ function errorOf(composition: Composition, temperatureK: number): number {
   return Math.hypot(sd / other, cold) * Math.min(1, 2 * other);
 }
 
+/** Name of a solvent that splits from water at this temperature, when there is enough of both. */
+function splittingAt(composition: Composition, temperatureK: number): string | undefined {
+  const enough = 0.1;
+  const celsius = temperatureK - 273.15;
+  const water = composition.components.find(({ solvent }) => solvent.nucleophile === "water");
+  if (!water || water.volumeFraction < enough) return undefined;
+  return composition.components.find(
+    ({ solvent, volumeFraction }) =>
+      volumeFraction >= enough && solvent.splits && celsius > solvent.splits[0] && celsius < solvent.splits[1],
+  )?.solvent.name;
+}
+
 function compute(composition: Composition, temperatureK: number): Activities {
   const { components } = composition;
   const activity: Record<string, number> = {};
@@ -161,6 +173,11 @@ function compute(composition: Composition, temperatureK: number): Activities {
     });
     if (twoPhases) flags.push("these solvents form two liquid phases");
     if (model.unifac.predicted) flags.push("some group parameters are predicted, not published");
+  }
+  const splitting = splittingAt(composition, temperatureK);
+  if (splitting && !twoPhases) {
+    twoPhases = true;
+    flags.push(`${splitting} and water form two liquid phases at this temperature`);
   }
   const ideal = components.filter((component) => !isModelled(component.solvent));
   if (ideal.length > 0 && components.length > 1)

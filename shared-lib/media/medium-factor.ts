@@ -37,11 +37,45 @@ const KETO_ACID_EXPONENT = 6;
 /** Down to this mole fraction of water DMSO hydrates trifluoroacetophenones at least as much as water does (Stewart, Van Dyke 1970). */
 const DMSO_LIMIT = 0.15;
 
-/** Error of log10 of the ratio by the volume fraction of water, from the assessments of mixed media. */
-function usualSd(waterShare: number): number {
-  if (waterShare > 0.995) return 0.02;
-  if (waterShare > 0.5) return 0.1;
-  return waterShare > 0.1 ? 0.25 : 0.5;
+/** Errors of log10 of a ratio by a volume fraction, from the assessments of mixed media; straight lines between the points, falling in share. */
+type ErrorCurve = readonly (readonly [number, number])[];
+const BESIDE_OTHERS: ErrorCurve = [
+  [1, 0.02],
+  [0.95, 0.1],
+  [0.6, 0.1],
+  [0.5, 0.25],
+  [0.15, 0.25],
+  [0.1, 0.5],
+  [0, 0.5],
+];
+const BESIDE_ALCOHOLS: ErrorCurve = [
+  [1, 0.02],
+  [0.95, 0.15],
+  [0, 0.15],
+];
+const ALCOHOL_BESIDE_OTHERS: ErrorCurve = [
+  [1, 0.05],
+  [0.95, 0.15],
+  [0.6, 0.15],
+  [0.5, 0.25],
+  [0.15, 0.25],
+  [0.1, 0.4],
+  [0, 0.4],
+];
+const ALCOHOL_BESIDE_PROTIC: ErrorCurve = [
+  [1, 0.05],
+  [0.95, 0.15],
+  [0, 0.15],
+];
+
+function errorAt(curve: ErrorCurve, share: number): number {
+  let from = curve[0] as readonly [number, number];
+  for (const to of curve) {
+    if (share >= to[0])
+      return to[0] === from[0] ? to[1] : to[1] + ((from[1] - to[1]) * (share - to[0])) / (from[0] - to[0]);
+    from = to;
+  }
+  return from[1];
 }
 
 /** Below 0 °C and above 70 °C the error grows, by 0.05 per 20 K, in quadrature. */
@@ -84,6 +118,17 @@ function waterActivity(composition: Composition, activities: Activities): number
   return Math.min(1, sum);
 }
 
+/** J/mol, of ice at 0 °C (handbook value, recalled), and the gas constant. */
+const FUSION = 6008;
+const GAS = 8.314462618;
+
+/** Activity of water in a liquid in equilibrium with ice; 1 from 0 °C on. */
+export function iceActivity(temperatureK: number): number {
+  return temperatureK >= 273.15 ? 1 : Math.exp((-FUSION / GAS) * (1 / temperatureK - 1 / 273.15));
+}
+
+const ICE_FLAG = "ice forms at this temperature: the liquid holds less water than is written";
+
 interface Rule {
   readonly log10: number;
   readonly sd: number;
@@ -96,8 +141,11 @@ function solventRule(shares: Shares, activity: number, twoPhases: boolean, trait
   const lift = traits.ketoAcid ? 0 : (shares.rest * Math.max(0, apart)) / 2;
   // The two limits as a flat range between them, and a tenth for the rest; alcohols have their own, smaller error.
   const between = Math.hypot(Math.min(0.5, Math.abs(apart) / 2) / Math.sqrt(3), 0.1);
-  const usual = Math.max(usualSd(shares.water), shares.rest * between);
-  const protic = shares.water > 0.995 ? 0.02 : 0.15;
+  const usual = Math.max(
+    errorAt(BESIDE_OTHERS, shares.water),
+    shares.rest * between * Math.min(1, 20 * (1 - shares.water)),
+  );
+  const protic = errorAt(BESIDE_ALCOHOLS, shares.water);
   let log10 = byVolume + lift;
   let sd = shares.alcohol * protic + (1 - shares.alcohol) * usual;
   if (traits.acidicDiol && shares.dmso > 0) {
@@ -168,7 +216,10 @@ export function hydrationFactor(composition: Composition, temperatureK: number, 
     get lines() {
       return hydrationLines(shares, activity, solvent, salt, traits);
     },
-    flags: activities.flags,
+    flags:
+      activity * (traits.saltActivity ?? 1) > iceActivity(temperatureK) + 0.01
+        ? [...activities.flags, ICE_FLAG]
+        : activities.flags,
   };
 }
 
@@ -192,8 +243,8 @@ export function hemiacetalFactor(composition: Composition, alcohol: string, temp
   if (!(phi > 0)) return NONE;
   const dilute = Math.max(0, 1 - protic / WEAK_SOLVENT_LIMIT);
   const log10 = Math.log10(phi) + WEAK_SOLVENT_FACTOR * weak * dilute;
-  const inProtic = phi > 0.995 ? 0.05 : 0.15;
-  const usual = phi > 0.5 ? 0.15 : phi > 0.1 ? 0.25 : 0.4;
+  const inProtic = errorAt(ALCOHOL_BESIDE_PROTIC, phi);
+  const usual = errorAt(ALCOHOL_BESIDE_OTHERS, phi);
   const sd = withTemperature(protic * inProtic + (1 - protic) * usual, temperatureK);
   return {
     log10,

@@ -27,6 +27,8 @@ export interface Solvent {
   readonly bottleWater: number;
   /** Miscible with water in all proportions at 25 °C. */
   readonly miscible: boolean;
+  /** Temperatures (°C) between which it forms two phases with water although it mixes at others. */
+  readonly splits?: readonly [number, number];
   /** Mole fraction of water in the solvent saturated with it at 25 °C, where it takes up little. */
   readonly waterSaturation?: number;
   /** Expected error of ln a of water beside it. */

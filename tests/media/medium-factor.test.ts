@@ -85,6 +85,36 @@ describe("hydration in mixed media", () => {
     expect(factor.flags.join()).toContain("two liquid phases");
   });
 
+  // Known limits, recalled: acetonitrile and water split below −1.3 °C, triethylamine and water above 18 °C.
+  it("knows the temperatures at which solvents split from water", () => {
+    const flags = (other: string, kelvin: number): string =>
+      hydrationFactor(binary("water", other, 0.6), kelvin, PLAIN).flags.join();
+    expect(flags("acetonitrile", 263.15)).toContain("two liquid phases");
+    expect(flags("acetonitrile", 298.15)).not.toContain("two liquid phases");
+    expect(flags("triethylamine", 298.15)).toContain("two liquid phases");
+    expect(flags("triethylamine", 283.15)).not.toContain("two liquid phases");
+  });
+
+  // Ice separates from water below 0 °C, not from 50 % (v/v) methanol at −20 °C nor from brine at −15 °C (common practice, no source).
+  it("says where ice forms", () => {
+    const water = compositionOf([{ solvent: "water", amount: 1 }], 263.15);
+    expect(hydrationFactor(water, 263.15, PLAIN).flags.join()).toContain("ice");
+    expect(hydrationFactor(water, 258.15, { ...PLAIN, saltActivity: 0.76 }).flags.join()).not.toContain("ice");
+    expect(hydrationFactor(binary("water", "methanol", 0.69), 253.15, PLAIN).flags.join()).not.toContain("ice");
+    expect(hydrationFactor(binary("water", "methanol", 0.69), 223.15, PLAIN).flags.join()).toContain("ice");
+  });
+
+  it("has an error that changes without jumps", () => {
+    for (const other of ["acetonitrile", "methanol", "DMSO"]) {
+      let last: number | undefined;
+      for (let x = 0.001; x < 1; x += 0.001) {
+        const { sd } = hydrationFactor(binary("water", other, x), 298.15, PLAIN);
+        if (last !== undefined) expect(Math.abs(sd - last), `${other} ${x}`).toBeLessThan(0.02);
+        last = sd;
+      }
+    }
+  });
+
   it("grows less certain below 0 °C and above 70 °C", () => {
     const at = (kelvin: number): number => hydrationFactor(binary("water", "methanol", 0.5), kelvin, PLAIN).sd;
     expect(at(253.15)).toBeGreaterThan(at(298.15));

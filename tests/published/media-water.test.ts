@@ -4,6 +4,7 @@ import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { activitiesOf } from "../../shared-lib/media/activities.ts";
 import { compositionOf } from "../../shared-lib/media/composition.ts";
+import { iceActivity } from "../../shared-lib/media/medium-factor.ts";
 import { activityOverSalt, saltByKey, saltWaterActivity, saturatedActivity } from "../../shared-lib/media/salts.ts";
 import { molesInMass, solventByKey } from "../../shared-lib/media/solvents.ts";
 import { ethanolMassFraction } from "../../shared-lib/media/stock-media.ts";
@@ -38,6 +39,22 @@ describe("water beside an organic liquid, from freezing points and total pressur
   it("ln a of freezing solutions to 0.01 on average", () => {
     expect(errors.filter((row) => row.type === "freezing").length).toBeGreaterThan(50);
     expect(meanOf("freezing")).toBeLessThan(0.01);
+  });
+  it("and so the freezing point itself: the model's water is as active there as ice, to 0.02", () => {
+    for (const [type, organic = "", x, celsius] of rowsOf("./media-water-points.tsv")) {
+      if (type !== "freezing") continue;
+      const kelvin = Number(celsius) + 273.15;
+      const water = Number(x);
+      const composition = compositionOf(
+        [
+          { solvent: "water", amount: water },
+          { solvent: organic, amount: 1 - water },
+        ],
+        kelvin,
+      );
+      const found = activitiesOf(composition, kelvin).activity.water ?? Number.NaN;
+      expect(Math.abs(found - iceActivity(kelvin)), `${organic} ${x}`).toBeLessThan(0.02);
+    }
   });
   it("ln a of ethanol–water at 30 and 50 °C to 0.01 on average", () => {
     expect(meanOf("pressure")).toBeLessThan(0.01);
