@@ -2,11 +2,14 @@
 
 import { cardOfMention } from "../shared-lib/report/card/card.ts";
 import { cardMarkdown } from "../shared-lib/report/card/card-markdown.ts";
+import { toNoteReport } from "../shared-lib/report/note-report.ts";
+import type { NoteOnFile } from "../shared-lib/report/types.ts";
 import type { AnswerContext } from "./answer-editor.ts";
 import { answerEstimate } from "./estimate-request.ts";
 import { curvesOf } from "./features/curves.ts";
 import { carbonylMentionAt } from "./features/hover.ts";
 import { pageOf } from "./features/page.ts";
+import { reportOf } from "./features/report.ts";
 import { checkOf, listOf, marginOf } from "./features/whole-note.ts";
 import { formatOfName } from "./notes.ts";
 import {
@@ -19,6 +22,7 @@ import {
   type MarginLabel,
   METHODS,
   type NoteText,
+  type ReportRequest,
   type Theme,
 } from "./protocol.ts";
 import { DEFAULT_EDITOR_SETTINGS } from "./settings.ts";
@@ -78,6 +82,18 @@ export function answerOwnClient(context: AnswerContext & { readonly refresh: () 
     guard<CurvesRequest, Curves | null>("curves", null, async (request) => {
       const note = await noteAt(request.uri);
       return (note && curvesOf(note, request)) ?? null;
+    }),
+  );
+  connection.onRequest(
+    METHODS.report,
+    guard<ReportRequest, string>("report", "", async ({ notes, format }) => {
+      const settings = DEFAULT_EDITOR_SETTINGS.analysis;
+      const read: NoteOnFile[] = [];
+      for (const note of notes) {
+        const report = toNoteReport(note.name, note.text, await analysed(note), engine.lexicon(), settings);
+        read.push({ report, text: note.text });
+      }
+      return reportOf(read, format);
     }),
   );
   connection.onRequest(

@@ -66,6 +66,11 @@ export interface NoteText {
   readonly text: string;
 }
 
+export interface ReportRequest {
+  readonly notes: readonly NoteText[];
+  readonly format: "html" | "markdown";
+}
+
 export interface FoundInNote {
   readonly code: string;
   readonly severity: "hint" | "note" | "warning";

@@ -6,6 +6,7 @@ import { METHODS } from "../../server/protocol.ts";
 import { registerCheckFolder } from "./commands/check-folder.ts";
 import { registerEstimate } from "./commands/estimate.ts";
 import { registerExamples } from "./commands/examples.ts";
+import { registerExportReport } from "./commands/export-report.ts";
 import { registerList } from "./commands/list-estimates.ts";
 import { FolderView } from "./folder-view.ts";
 import { registerPages } from "./pages.ts";
@@ -38,6 +39,7 @@ export function activateWith(context: vscode.ExtensionContext, create: () => Bas
     ...registerEstimate(context, server),
     ...registerList(server),
     registerCheckFolder(folder),
+    registerExportReport(server),
     ...registerExamples(context),
     ...registerPanel(context, server),
     preview,

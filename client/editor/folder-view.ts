@@ -2,12 +2,8 @@
 
 import * as vscode from "vscode";
 import { type CheckReply, type FoundInNote, METHODS } from "../../server/protocol.ts";
+import { notesOfFolder, textOfNote } from "./notes-of-folder.ts";
 import type { Server } from "./server.ts";
-
-const NOTES_GLOB = "**/*.{md,markdown,txt}";
-const LEFT_OUT = "**/node_modules/**";
-const MOST_NOTES = 5_000;
-const LONGEST_NOTE = 2_000_000;
 
 interface NoteRow {
   readonly kind: "note";
@@ -50,10 +46,10 @@ export class FolderView implements vscode.TreeDataProvider<Row> {
     progress: vscode.Progress<{ message?: string; increment?: number }>,
     token: vscode.CancellationToken,
   ): Promise<void> {
-    const uris = await vscode.workspace.findFiles(NOTES_GLOB, LEFT_OUT, MOST_NOTES, token);
+    const uris = await notesOfFolder(token);
     const rows: NoteRow[] = [];
     let unread = 0;
-    for (const uri of uris.sort((a, b) => a.path.localeCompare(b.path))) {
+    for (const uri of uris) {
       if (token.isCancellationRequested) break;
       progress.report({ message: vscode.workspace.asRelativePath(uri), increment: 100 / uris.length });
       const reply = await this.#check(uri, token);
@@ -75,14 +71,11 @@ export class FolderView implements vscode.TreeDataProvider<Row> {
   }
 
   async #check(uri: vscode.Uri, token: vscode.CancellationToken): Promise<CheckReply | undefined> {
-    try {
-      const bytes = await vscode.workspace.fs.readFile(uri);
-      if (bytes.length > LONGEST_NOTE) return undefined;
-      const text = new TextDecoder().decode(bytes);
-      return await this.#server.request<CheckReply>(METHODS.checkText, { name: uri.toString(), text }, token);
-    } catch {
-      return undefined;
-    }
+    const text = await textOfNote(uri);
+    if (text === undefined) return undefined;
+    return await this.#server
+      .request<CheckReply>(METHODS.checkText, { name: uri.toString(), text }, token)
+      .catch(() => undefined);
   }
 
   getChildren(row?: Row): Row[] {

@@ -105,14 +105,21 @@ export async function placeOf({ page }: Person, words: string, line?: string): P
   return place;
 }
 
-/** Rests the pointer on words and gives the card. */
+/** Rests the pointer on words and gives the card; tries again while the server is still starting. */
 export async function restOn(person: Person, words: string, line?: string): Promise<Locator> {
-  const { x, y } = await placeOf(person, words, line);
-  await person.page.mouse.move(x - 3, y);
-  await person.page.mouse.move(x, y, { steps: 4 });
   const card = person.page.locator(".monaco-hover:not(.hidden) .monaco-hover-content").first();
-  await card.waitFor();
-  return card;
+  const end = Date.now() + PATIENCE;
+  for (;;) {
+    const { x, y } = await placeOf(person, words, line);
+    await person.page.mouse.move(x - 40, y + 200);
+    await person.page.mouse.move(x, y, { steps: 4 });
+    const seen = await card.waitFor({ timeout: 3_000 }).then(
+      () => true,
+      () => false,
+    );
+    if (seen) return card;
+    if (Date.now() > end) throw new Error(`no card appears over “${words}”`);
+  }
 }
 
 /** Puts the cursor on words. */
