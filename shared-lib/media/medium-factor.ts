@@ -20,6 +20,25 @@ export interface MediumFactor {
   readonly flags: readonly string[];
 }
 
+/** A factor whose lines are written when they are read. */
+class LazyFactor implements MediumFactor {
+  readonly log10: number;
+  readonly sd: number;
+  readonly flags: readonly string[];
+  readonly #write: () => readonly DerivationLine[];
+
+  constructor(log10: number, sd: number, flags: readonly string[], write: () => readonly DerivationLine[]) {
+    this.log10 = log10;
+    this.sd = sd;
+    this.flags = flags;
+    this.#write = write;
+  }
+
+  get lines(): readonly DerivationLine[] {
+    return this.#write();
+  }
+}
+
 /** What of the compound and of the solutes changes the rule. */
 export interface MediumTraits {
   /** An α-keto acid: its hydration falls with the sixth to seventh power of the activity of water. */
@@ -210,17 +229,13 @@ export function hydrationFactor(composition: Composition, temperatureK: number, 
   const activity = waterActivity(composition, activities);
   const solvent = solventRule(shares, activity, activities.twoPhases, traits);
   const salt = saltRule(traits);
-  return {
-    log10: solvent.log10 + salt.log10,
-    sd: withTemperature(Math.hypot(solvent.sd, salt.sd), temperatureK),
-    get lines() {
-      return hydrationLines(shares, activity, solvent, salt, traits);
-    },
-    flags:
-      activity * (traits.saltActivity ?? 1) > iceActivity(temperatureK) + 0.01
-        ? [...activities.flags, ICE_FLAG]
-        : activities.flags,
-  };
+  const ice = activity * (traits.saltActivity ?? 1) > iceActivity(temperatureK) + 0.01;
+  return new LazyFactor(
+    solvent.log10 + salt.log10,
+    withTemperature(Math.hypot(solvent.sd, salt.sd), temperatureK),
+    ice ? [...activities.flags, ICE_FLAG] : activities.flags,
+    () => hydrationLines(shares, activity, solvent, salt, traits),
+  );
 }
 
 /** Solvents that do not solvate an O–H leave a dilute alcohol, and so the hemiacetal's ratio, up to this factor higher. */
@@ -246,19 +261,15 @@ export function hemiacetalFactor(composition: Composition, alcohol: string, temp
   const inProtic = errorAt(ALCOHOL_BESIDE_PROTIC, phi);
   const usual = errorAt(ALCOHOL_BESIDE_OTHERS, phi);
   const sd = withTemperature(protic * inProtic + (1 - protic) * usual, temperatureK);
-  return {
-    log10,
-    sd,
-    get lines() {
-      if (phi > 0.9999) return [];
-      return [
-        {
-          says: `${alcohol} is ${(phi * 100).toPrecision(2)} % of the volume: the hemiacetal ratio scales with its concentration`,
-          value: `× ${(10 ** log10).toPrecision(2)}`,
-          source: "our rule; see the methods page",
-        },
-      ];
-    },
-    flags: activitiesOf(composition, temperatureK).flags,
-  };
+  return new LazyFactor(log10, sd, activitiesOf(composition, temperatureK).flags, () =>
+    phi > 0.9999
+      ? []
+      : [
+          {
+            says: `${alcohol} is ${(phi * 100).toPrecision(2)} % of the volume: the hemiacetal ratio scales with its concentration`,
+            value: `× ${(10 ** log10).toPrecision(2)}`,
+            source: "our rule; see the methods page",
+          },
+        ],
+  );
 }
