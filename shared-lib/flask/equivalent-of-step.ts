@@ -28,8 +28,8 @@ const AGREEING = 0.05;
 const MOST_COUNTED = 50;
 
 /**
- * Equivalents as the writer counts them: what most charges with both figures agree on, first of all the one written as 1
- * equivalent; without any, the smallest reagent is the limiting one.
+ * Equivalents as the writer counts them: what most charges with both figures agree on, first of all one written as 1
+ * equivalent with its amount; without any, the smallest reagent is the limiting one.
  *
  * @param charges of one step
  * @param written by index into the reading's charges
@@ -40,13 +40,21 @@ export function equivalentOfStep(
 ): EquivalentOfStep | undefined {
   const counted = charges.slice(0, MOST_COUNTED).flatMap(({ charge, total }) => {
     const { equivalents, amount = total?.value } = written.get(charge) ?? {};
-    return amount && equivalents ? [{ charge, mol: amount / equivalents, one: equivalents === 1 }] : [];
+    return amount && equivalents
+      ? [
+          {
+            charge,
+            mol: amount / equivalents,
+            sure: (equivalents === 1 ? 0.5 : 0) + (written.get(charge)?.amount ? 0.25 : 0),
+          },
+        ]
+      : [];
   });
   let best: EquivalentOfStep | undefined;
   let most = 0;
-  for (const { charge, mol, one } of counted) {
+  for (const { charge, mol, sure } of counted) {
     const agreeing = counted.filter((other) => Math.abs(other.mol / mol - 1) <= AGREEING).length;
-    const weight = agreeing + (one ? 0.5 : 0);
+    const weight = agreeing + sure;
     if (weight <= most) continue;
     best = { mol, charge, by: "written" };
     most = weight;

@@ -84,33 +84,32 @@ function lookAtEquivalents(context: AdviceContext, step: StepView, charge: Resol
   const one = step.equivalent;
   const written = context.reading.charges[charge.charge];
   const mention = context.reading.mentions[charge.mention];
-  if (one?.by !== "written" || one.charge === charge.charge || !written || !mention || !countIsSure(context, step))
-    return [];
+  if (one?.by !== "written" || one.charge === charge.charge || !written || !mention) return [];
   const { amount, equivalents } = writtenQuantities(written);
   if (!amount || !equivalents || [amount, equivalents].some((row) => row.approximate || row.range)) return [];
   const rounding = roundingOf(context.text, amount) + roundingOf(context.text, equivalents);
   const meant = equivalents.base * one.mol;
   if (agrees(meant, amount.base, rounding, EXPLAINED)) return [];
+  const place = { start: mention.start, end: mention.end, mention: charge.mention };
+  if (agreeingCounts(context, step) < 2) {
+    if (equivalents.base !== 1) return [];
+    const message = `${amount.text} of ${charge.compound.name} and ${amountText(one.mol)} of another charge are both written as 1 equiv.`;
+    return [{ ...place, message, fixes: [] }];
+  }
   const actual = trimmed(amount.base / one.mol, 3);
   const message = `${amount.text} of ${charge.compound.name} is ${actual} equiv of ${amountText(one.mol)}, not ${equivalents.text}.`;
   const fix = scaleCharge(context.text, written, ["equivalents"], amount.base / meant);
   const fixes = fix ? [{ title: `Keep the amount: it is ${actual} equiv`, edits: fix, safe: false }] : [];
-  return [{ start: mention.start, end: mention.end, mention: charge.mention, message, fixes }];
+  return [{ ...place, message, fixes }];
 }
 
-/** One charge of one equivalent, and at least two charges that agree on what that is. */
-function countIsSure(context: AdviceContext, step: StepView): boolean {
-  let ones = 0;
-  let agreeing = 0;
-  for (const { charge } of step.charges) {
-    const source = context.reading.charges[charge];
-    if (!source) continue;
-    const { amount, equivalents } = writtenQuantities(source);
-    if (equivalents?.base === 1) ones += 1;
-    if (amount && equivalents && step.equivalent && agrees(amount.base / equivalents.base, step.equivalent.mol, 0, 0.1))
-      agreeing += 1;
-  }
-  return ones === 1 && agreeing >= 2;
+/** Number of charges that agree on what one equivalent is; with fewer than two nobody knows which of them is off. */
+function agreeingCounts({ reading }: AdviceContext, { charges, equivalent }: StepView): number {
+  return charges.filter(({ charge }) => {
+    const source = reading.charges[charge];
+    const { amount, equivalents } = source ? writtenQuantities(source) : {};
+    return amount && equivalents && equivalent && agrees(amount.base / equivalents.base, equivalent.mol, 0, EXPLAINED);
+  }).length;
 }
 
 export const amountsDisagree: FindingRule = {

@@ -32,7 +32,7 @@ function lookAt(view: CarbonylView): readonly RawFinding[] {
   const place = { start: mention.start, end: mention.end, mention: charge.mention, fixes: [] };
   const key = view.moment.contents.buffer?.buffer;
   const buffer = key ? bufferByKey(key) : undefined;
-  if (buffer?.reacts && kind?.id !== "imine") {
+  if (buffer?.reacts === "yes" && kind?.id !== "imine") {
     const message = `The buffer ${buffer.key} binds ${charge.compound.name} itself; a buffer without an amine (phosphate, acetate) leaves it alone.`;
     return [{ ...place, message }];
   }

@@ -10,7 +10,17 @@ import type { StepFacts, StepKind } from "./types.ts";
 const STEP_DIRECTIVE = "step";
 
 /** Tags that make a charge no partner: it only sets the scene. */
-const SCENERY = new Set(["salt", "aldehyde", "ketone", "drying agent"]);
+const SCENERY = new Set([
+  "salt",
+  "aldehyde",
+  "ketone",
+  "drying agent",
+  "acid",
+  "strong acid",
+  "base",
+  "tertiary amine",
+  "catalyst",
+]);
 
 /** What was charged, as a step kind sees it. */
 export function factsOf(charges: readonly ResolvedCharge[], decisive: SpeciatedMoment | undefined): StepFacts {
