@@ -1,6 +1,6 @@
 /** Bundles the terminal command, the language server (Node and Web Worker), the extension (Node and browser) and the panel into dist/. */
 import { copyFile, readdir, rm } from "node:fs/promises";
-import { type BuildOptions, build } from "esbuild";
+import { type BuildOptions, build, type Plugin } from "esbuild";
 
 const shared: BuildOptions = {
   bundle: true,
@@ -20,9 +20,27 @@ const editor: BuildOptions = {
   define: { EXAMPLE_NOTES: JSON.stringify(exampleNotes) },
 };
 
+/** The structure toolkit is one module for Node and the worker: a dynamic import of it stays an import, beside the file that makes it. */
+const structuresApart: Plugin = {
+  name: "structures-apart",
+  setup(bundler) {
+    bundler.onResolve({ filter: /\/compounds\/structure\.ts$/ }, ({ kind }) =>
+      kind === "dynamic-import" ? { path: "./structures.mjs", external: true } : undefined,
+    );
+  },
+};
+
 await rm("dist", { recursive: true, force: true });
 await Promise.all([
-  // One set of chunks for the terminal and the server: the structure toolkit is a chunk of its own, loaded on first need.
+  build({
+    ...shared,
+    entryPoints: { structures: "shared-lib/compounds/structure.ts" },
+    platform: "neutral",
+    format: "esm",
+    mainFields: ["module", "main"],
+    outExtension: { ".js": ".mjs" },
+  }),
+  // One set of chunks for the terminal and the server, all in one folder so that they find the toolkit beside them.
   build({
     ...shared,
     entryPoints: { oxomargin: "client/terminal/main.ts", "server-node": "server/start-node.ts" },
@@ -30,7 +48,8 @@ await Promise.all([
     format: "esm",
     splitting: true,
     outExtension: { ".js": ".mjs" },
-    chunkNames: "chunks/[name]-[hash]",
+    chunkNames: "shared-[hash]",
+    plugins: [structuresApart],
     banner: { js: "import{createRequire as __cr}from'node:module';const require=__cr(import.meta.url);" },
   }),
   build({
@@ -45,7 +64,6 @@ await Promise.all([
     ...shared,
     entryPoints: {
       "server-worker": "server/start-worker.ts",
-      structures: "server/structures-script.ts",
       panel: "client/editor/panel/page/page.ts",
     },
     platform: "browser",

@@ -1,7 +1,7 @@
 /** The report of a set of notes, in the same words as the terminal's. */
 
-import { version } from "../../package.json" with { type: "json" };
-import { tables } from "../../shared-lib/generated/tables-version.json" with { type: "json" };
+import { version } from "../../package.json";
+import { tables } from "../../shared-lib/generated/tables-version.json";
 import { WRITERS } from "../../shared-lib/report/formats.ts";
 import { addSummary, summaryOf } from "../../shared-lib/report/summary.ts";
 import type { NoteOnFile } from "../../shared-lib/report/types.ts";
