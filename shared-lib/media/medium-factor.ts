@@ -11,6 +11,15 @@
 import type { DerivationLine } from "../model/contract.ts";
 import { type Activities, activitiesOf } from "./activities.ts";
 import type { Component, Composition } from "./composition.ts";
+import { iceActivity } from "./ice.ts";
+import {
+  ALCOHOL_BESIDE_OTHERS,
+  ALCOHOL_BESIDE_PROTIC,
+  BESIDE_ALCOHOLS,
+  BESIDE_OTHERS,
+  errorAt,
+  withTemperature,
+} from "./medium-errors.ts";
 
 export interface MediumFactor {
   readonly log10: number;
@@ -56,53 +65,6 @@ const KETO_ACID_EXPONENT = 6;
 /** Down to this mole fraction of water DMSO hydrates trifluoroacetophenones at least as much as water does (Stewart, Van Dyke 1970). */
 const DMSO_LIMIT = 0.15;
 
-/** Errors of log10 of a ratio by a volume fraction, from the assessments of mixed media; straight lines between the points, falling in share. */
-type ErrorCurve = readonly (readonly [number, number])[];
-const BESIDE_OTHERS: ErrorCurve = [
-  [1, 0.02],
-  [0.95, 0.1],
-  [0.6, 0.1],
-  [0.5, 0.25],
-  [0.15, 0.25],
-  [0.1, 0.5],
-  [0, 0.5],
-];
-const BESIDE_ALCOHOLS: ErrorCurve = [
-  [1, 0.02],
-  [0.95, 0.15],
-  [0, 0.15],
-];
-const ALCOHOL_BESIDE_OTHERS: ErrorCurve = [
-  [1, 0.05],
-  [0.95, 0.15],
-  [0.6, 0.15],
-  [0.5, 0.25],
-  [0.15, 0.25],
-  [0.1, 0.4],
-  [0, 0.4],
-];
-const ALCOHOL_BESIDE_PROTIC: ErrorCurve = [
-  [1, 0.05],
-  [0.95, 0.15],
-  [0, 0.15],
-];
-
-function errorAt(curve: ErrorCurve, share: number): number {
-  let from = curve[0] as readonly [number, number];
-  for (const to of curve) {
-    if (share >= to[0])
-      return to[0] === from[0] ? to[1] : to[1] + ((from[1] - to[1]) * (share - to[0])) / (from[0] - to[0]);
-    from = to;
-  }
-  return from[1];
-}
-
-/** Below 0 °C and above 70 °C the error grows, by 0.05 per 20 K, in quadrature. */
-function withTemperature(sd: number, temperatureK: number): number {
-  const beyond = Math.max(0, 273.15 - temperatureK, temperatureK - 343.15);
-  return beyond > 0 ? Math.hypot(sd, (0.05 * beyond) / 20) : sd;
-}
-
 interface Shares {
   readonly water: number;
   readonly waterMoles: number;
@@ -135,15 +97,6 @@ function waterActivity(composition: Composition, activities: Activities): number
   for (const { solvent } of composition.components)
     if (solvent.nucleophile === "water") sum += activities.activity[solvent.key] ?? 0;
   return Math.min(1, sum);
-}
-
-/** J/mol, of ice at 0 °C (handbook value, recalled), and the gas constant. */
-const FUSION = 6008;
-const GAS = 8.314462618;
-
-/** Activity of water in a liquid in equilibrium with ice; 1 from 0 °C on. */
-export function iceActivity(temperatureK: number): number {
-  return temperatureK >= 273.15 ? 1 : Math.exp((-FUSION / GAS) * (1 / temperatureK - 1 / 273.15));
 }
 
 const ICE_FLAG = "ice forms at this temperature: the liquid holds less water than is written";

