@@ -34,8 +34,12 @@ export function hang(molecule: Molecule, atom: number, group: Group): void {
 export function onFree(base: Group, group: Group, count: number): Group | undefined {
   if (base.free === undefined) return undefined;
   const molecule = base.molecule.copy();
+  const offset = molecule.atoms.length;
   for (let i = 0; i < count; i++) hang(molecule, base.free, group);
-  return { ...base, molecule };
+  // "3-bromopropyloxy", "4-chlorophenylthio": the numbers are those of the inner group, for the joining one has none of its own.
+  const inner = count === 1 && base.locants.size <= 1;
+  const locants = inner ? new Map([...group.locants].map(([locant, atom]) => [locant, atom + offset])) : base.locants;
+  return { ...base, molecule, locants };
 }
 
 /**

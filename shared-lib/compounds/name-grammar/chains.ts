@@ -73,6 +73,8 @@ function unsaturation(
   text: string,
   at: number,
   leading: readonly string[] | undefined,
+  length: number,
+  ring: boolean,
 ): { bonds: { locant: string; order: 2 | 3 }[]; end: number; usedLeading: boolean } | undefined {
   if (/^a(?:di|tri)(?:one|al|ol)/.test(text.slice(at, at + 7))) return { bonds: [], end: at + 1, usedLeading: false };
   if (text.startsWith("an", at)) return { bonds: [], end: at + 2, usedLeading: false };
@@ -82,7 +84,16 @@ function unsaturation(
   const order = found[3] === "yn" ? 3 : 2;
   const own = found[1]?.split(",");
   const usedLeading = own === undefined && leading !== undefined;
-  const locants = own ?? leading ?? ["1"];
+  // Without a locant: ethene, a ring, or the one place that an acid or aldehyde of three carbons leaves.
+  const end = at + found[0].length;
+  const only =
+    ring || length === 2
+      ? ["1"]
+      : length === 3 && /^(?:al|o(?:ic|ate|yl))/.test(text.slice(end, end + 4))
+        ? ["2"]
+        : undefined;
+  const locants = own ?? leading ?? only;
+  if (!locants) return undefined;
   if (locants.length !== count) return undefined;
   return { bonds: locants.map((locant) => ({ locant, order })), end: at + found[0].length, usedLeading };
 }
@@ -95,7 +106,7 @@ export function chainsAt(text: string, at: number, leading: readonly string[] | 
   return STEMS.flatMap(([stem, count]) => {
     if (!text.startsWith(stem, start)) return [];
     if (bridged && bridged.sizes[0] + bridged.sizes[1] + bridged.sizes[2] + 2 !== count) return [];
-    const found = unsaturation(text, start + stem.length, leading);
+    const found = unsaturation(text, start + stem.length, leading, count, ring);
     if (!found) return [];
     const { molecule, locants } = bridged ? bicyclic(bridged.sizes) : carbons(count, ring);
     for (const { locant, order } of found.bonds) {

@@ -6,7 +6,7 @@ import { LONGEST_NAME, readName } from "./parse.ts";
 /** How the name of an aldehyde or ketone ends, and how one of its esters, acids, salts and hydrates does. */
 const CARBONYL_END = /(?:aldehyde|[dnthpxym]al|one|phenone|furfural|piperonal|vanillin|benzil|benzoin|isatin)s?$/;
 const OTHER_END =
-  /(?:acid|ate|ester|ketone|hydrochloride|hydrate|hcl|nitrile|amide|amine|ol|phenol|aniline|toluene|benzene|anisole)s?$/;
+  /(?:acid|ate|ester|ketone|hydrochloride|hydrate|hcl|nitrile|amide|amine|ol|phenol|aniline|toluene|[a-z]ene|[a-z]ole|[a-z]ine|[a-z]ane|furan|pyran|coumaran|salt)s?$/;
 const INSIDE =
   /formyl|oxo|oyl|acetyl|keto|acetoacet|pyruv|glyoxyl|levulin|carbonyl|ketone|aldehyde|one hydr|anone|butyryl|propionyl/;
 

@@ -71,6 +71,12 @@ class Reader {
       const groupStart = count > 1 && text[end] === "-" ? end + 1 : end;
       for (const { group, end: behind } of this.groupsAt(text, groupStart, depth)) {
         if (behind >= text.length) continue;
+        // "methylthiochroman": the thio is the ring's.
+        if (
+          text.startsWith("thio", behind - 4) &&
+          /^(?:chrom|pyran|phen|morph|xanth)/.test(text.slice(behind, behind + 5))
+        )
+          continue;
         const next = text[behind] === "-" ? behind + 1 : behind;
         const placed: Placed = { count, group, ...(list ? { locants: list.locants } : {}) };
         const result = this.walk(text, next, { ...prefixes, placed: [...prefixes.placed, placed] }, depth, finish);
@@ -126,6 +132,15 @@ class Reader {
       const attach = yl ? piece.locants.get(yl[1] ?? "") : undefined;
       if (yl && attach !== undefined) found.push({ group: { ...groupOf(piece), attach }, end: behind + yl[0].length });
     }
+    for (const chain of chainsAt(text, at, undefined)) {
+      const yl = /^(?:-(\d{1,2})-)?yl(?!id)/.exec(text.slice(chain.end, chain.end + 8));
+      const attach = yl ? chain.locants.get(yl[1] ?? "1") : undefined;
+      if (yl && attach !== undefined)
+        found.push({
+          group: { molecule: chain.molecule, order: 1, locants: chain.locants, attach },
+          end: chain.end + yl[0].length,
+        });
+    }
     const close = closingBracket(text, at);
     if (close !== undefined && depth < DEEPEST_BRACKET) {
       const group = this.substituent(text.slice(at + 1, close), depth + 1);
@@ -145,10 +160,35 @@ class Reader {
       )) {
         if (end !== (leading ? leading.join(",").length + 1 + text.length - from : text.length)) continue;
         const molecule = group.molecule.copy();
-        if (place(molecule, group, prefixes)) return { ...group, molecule };
+        if (hydrogenate(molecule, group, prefixes.hydro, []) && place(molecule, group, prefixes))
+          return { ...group, molecule };
       }
-      return undefined;
+      return leading ? this.#numberedYl(text, at, prefixes, leading) : undefined;
     });
+  }
+
+  /** "5-methyl-4-oxazolyl", "2-butynyl": the locant right before the parent is that of its free bond. */
+  #numberedYl(text: string, at: number, prefixes: Prefixes, leading: readonly string[]): Group | undefined {
+    if (leading.length !== 1) return undefined;
+    const frames = [
+      ...piecesAt(grammarTables().parents, text, at).map((piece) => ({
+        frame: piece as Frame,
+        end: at + piece.name.length,
+        attach: piece.locants.get(leading[0] as string),
+      })),
+      ...chainsAt(text, at, leading).map((chain) => ({
+        frame: chain as Frame,
+        end: chain.end,
+        attach: chain.usedLeading ? 0 : undefined,
+      })),
+    ];
+    for (const { frame, end, attach } of frames) {
+      if (attach === undefined || text.slice(end) !== "yl") continue;
+      const molecule = frame.molecule.copy();
+      if (hydrogenate(molecule, frame, prefixes.hydro, []) && place(molecule, { ...frame, molecule }, prefixes))
+        return { molecule, order: 1, locants: frame.locants, attach };
+    }
+    return undefined;
   }
 
   /** The main name: prefixes on a parent with its suffix. */
@@ -229,7 +269,12 @@ class Reader {
     if (!hydrogenate(molecule, parent, saturated, ketone ? places : [])) return undefined;
     const oxygens = places.flatMap((atom) => suffix.add(molecule, atom));
     if (!this.#esterify(molecule, suffix.word.endsWith("ate") ? oxygens : [])) return undefined;
-    return place(molecule, { ...parent, molecule }, prefixes) ? molecule : undefined;
+    // "N-" on an amide or amine is its own nitrogen.
+    const nitrogen = /am(?:ide|ine)$/.test(suffix.word)
+      ? molecule.atoms.findLastIndex((atom) => atom.element === "N")
+      : -1;
+    const withNitrogen = nitrogen < 0 ? parent.locants : new Map([...parent.locants, ["n", nitrogen]]);
+    return place(molecule, { ...parent, locants: withNitrogen, molecule }, prefixes) ? molecule : undefined;
   }
 }
 
@@ -238,7 +283,11 @@ function hydrogenate(molecule: Molecule, parent: Frame, hydro: readonly string[]
   const atoms = hydro.map((locant) => parent.locants.get(locant));
   if (atoms.some((atom) => atom === undefined)) return false;
   const aromaticKetones = ketones.filter((atom) => molecule.atoms[atom]?.aromatic);
-  if (aromaticKetones.length > 0 && hydro.length === 0) return false;
+  // Without added hydrogen only two neighbours may become C=O: an indole-2,3-dione.
+  const [first, second] = aromaticKetones;
+  const neighbours =
+    aromaticKetones.length === 2 && molecule.bondBetween(first as number, second as number) !== undefined;
+  if (aromaticKetones.length > 0 && hydro.length === 0 && !neighbours) return false;
   const all = [...(atoms as number[]), ...aromaticKetones];
   return all.length === 0 || saturate(molecule, [...new Set(all)]);
 }
@@ -361,8 +410,40 @@ export function readName(name: string): string | undefined {
       again = true;
     }
   }
-  const molecule = readWhole(text);
+  const salt = saltOf(text);
+  if (salt) return salt + extra;
+  const molecule =
+    readWhole(text) ??
+    (text.includes(" ")
+      ? readWhole(text.replace(/ (?=(?:carb|acet|vanill|benzald|heptan|hexan|butan|propan|pentan))/g, ""))
+      : undefined);
   return molecule ? writeSmiles(molecule) + extra : undefined;
+}
+
+const METALS: Readonly<Record<string, string>> = {
+  sodium: "[Na+]",
+  potassium: "[K+]",
+  lithium: "[Li+]",
+  cesium: "[Cs+]",
+};
+
+/** "sodium pyruvate", "phenylpyruvic acid sodium salt": one carboxylate with its metal. */
+function saltOf(text: string): string | undefined {
+  const before = /^(sodium|potassium|lithium|cesium) (.+ate)$/.exec(text);
+  const behind = /^(.+ic acid),? (sodium|potassium|lithium|cesium) salt$/.exec(text);
+  const metal = METALS[before?.[1] ?? behind?.[2] ?? ""];
+  if (metal === undefined) return undefined;
+  const name = before ? (before[2] as string) : (behind?.[1] as string).replace(/ic acid$/, "ate");
+  // The anion's oxygen is written as that of an ester of astatine, which no name holds, and the bond is then cut.
+  const mark = new Molecule();
+  mark.addAtom("At");
+  const ester = new Reader([{ molecule: mark, order: 1, locants: new Map(), attach: 0 }]).main(name);
+  if (!ester) return undefined;
+  const at = ester.atoms.findIndex((atom) => atom.element === "At");
+  const oxygen = ester.neighbours(at)[0]?.atom;
+  return oxygen === undefined
+    ? undefined
+    : `${writeSmiles(ester).replace("O[At]", "[O-]").replace("[At]O", "[O-]")}.${metal}`;
 }
 
 function readWhole(text: string): Molecule | undefined {

@@ -46,10 +46,27 @@ function amide(molecule: Molecule, atom: number): readonly number[] {
   return simple("N")(molecule, atom);
 }
 
+/** CH2 and then a carbon with `add` on it: the conjunctive names ("indole-3-acetaldehyde"). */
+function onEthyl(
+  add: (molecule: Molecule, atom: number) => readonly number[],
+): (molecule: Molecule, atom: number) => readonly number[] {
+  return onCarbon(onCarbon(add));
+}
+
+function methylKetone(molecule: Molecule, atom: number): readonly number[] {
+  oxo(molecule, atom);
+  return simple("C")(molecule, atom);
+}
+
 /** Longest first. "ate" words are esters: they need an alkyl word before the name. */
 export const SUFFIXES: readonly Suffix[] = [
   { word: "dicarboxaldehyde", count: 2, terminal: false, add: onCarbon(oxo) },
   { word: "dicarbaldehyde", count: 2, terminal: false, add: onCarbon(oxo) },
+  { word: "carboaldehyde", count: 1, terminal: false, add: onCarbon(oxo) },
+  { word: "acetaldehyde", count: 1, terminal: false, add: onEthyl(oxo) },
+  { word: "acetone", count: 1, terminal: false, add: onEthyl(methylKetone) },
+  { word: "acetic acid", count: 1, terminal: false, add: onEthyl(acid) },
+  { word: "acetate", count: 1, terminal: false, add: onEthyl(acid) },
   { word: "carboxaldehyde", count: 1, terminal: false, add: onCarbon(oxo) },
   { word: "carbaldehyde", count: 1, terminal: false, add: onCarbon(oxo) },
   { word: "dicarboxylic acid", count: 2, terminal: false, add: onCarbon(acid) },
