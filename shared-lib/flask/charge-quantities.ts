@@ -6,9 +6,13 @@ import type { WrittenCount } from "./equivalent-of-step.ts";
 
 export type WrittenQuantities = Readonly<Partial<Record<AmountOf | "density", Quantity>>>;
 
-/** A zero, a negative or an unreadable figure is no amount; the notes stage has told the writer so. */
+/** Nothing in a laboratory or a plant lies outside, in g, L, mol or mol/L; beyond, quotients would leave the range of numbers. */
+const LEAST = 1e-15;
+const MOST = 1e15;
+
+/** A zero, a negative, an unreadable or a senseless figure is no amount; the notes stage has told the writer so. */
 export function usable(quantity: Quantity): boolean {
-  return Number.isFinite(quantity.base) && quantity.base > 0;
+  return quantity.base >= LEAST && quantity.base <= MOST;
 }
 
 /** Equivalents and amount of a charge, where equivalents are written. */
