@@ -1,11 +1,14 @@
 /** `oxomargin estimate`: one compound in one medium. */
 
-import type { Compound } from "../../shared-lib/compounds/types.ts";
+import type { Compound, StructureToolkit } from "../../shared-lib/compounds/types.ts";
 import { estimate } from "../../shared-lib/equilibrium/estimate.ts";
+import type { Estimate } from "../../shared-lib/model/contract.ts";
 import { readTemperature } from "../../shared-lib/notes/conditions.ts";
 import { readMedium } from "../../shared-lib/notes/read-medium.ts";
+import { estimatesAsTable } from "../../shared-lib/report/estimate-table.ts";
 import { estimateAsText } from "../../shared-lib/report/estimate-text.ts";
 import { Engine } from "./engine.ts";
+import { valuesOf } from "./ranges.ts";
 import type { Streams } from "./streams.ts";
 import { UsageError } from "./usage-error.ts";
 
@@ -19,18 +22,35 @@ export interface EstimateCall {
   readonly correlationOnly: boolean;
 }
 
-/** The compound that a SMILES, a name or a CAS number says. A structure of the catalogue keeps its name. */
+interface Conditions {
+  readonly temperatureK: number;
+  readonly pH?: number;
+  readonly concentration?: number;
+}
+
+const MOST_CONDITIONS = 1000;
+
+/** A solvent's row holds no formula: it follows from the structure. */
+function withFormula(compound: Compound, structures: StructureToolkit): Compound {
+  if (compound.formula !== "") return compound;
+  const reading = structures.read(compound.smiles);
+  return reading.ok ? { ...compound, formula: reading.formula, molarMass: reading.molarMass } : compound;
+}
+
+/** The compound that a SMILES, a name or a CAS number says; the toolkit is loaded only for what the tables do not know. */
 async function compoundOf(what: string, engine: Engine): Promise<Compound> {
+  const tabled = engine.lexicon.find(what);
+  if (tabled && tabled !== "needs structures" && tabled.compound.formula !== "") return tabled.compound;
   const structures = await engine.structures();
   const named = engine.lexicon.find(what, structures);
-  if (named && named !== "needs structures") return named.compound;
+  if (named && named !== "needs structures") return withFormula(named.compound, structures);
   const reading = structures.read(what);
   if (!reading.ok) {
     const at = reading.at === undefined ? "" : ` (at character ${reading.at + 1})`;
     throw new UsageError(`"${what}" is no name that is known, and as a SMILES: ${reading.problem}${at}`);
   }
   const known = engine.lexicon.bySmiles(reading.canonicalSmiles);
-  if (known) return known;
+  if (known) return withFormula(known, structures);
   return {
     id: reading.canonicalSmiles,
     name: what,
@@ -59,26 +79,57 @@ function temperatureOf(text: string): number {
   return kelvin;
 }
 
-/** Prints an estimate. @returns 0 @throws UsageError naming the option or the structure and the mend */
+function concentrationOf(text: string): number {
+  return numberOf("--conc", text.replace(/ ?(?:M|mol\/L)$/, ""), 0, 60, " mol/L");
+}
+
+/** The conditions asked for: one set, or every combination of the ranges. */
+function conditionsOf(call: EstimateCall, pHOfMedium: number | undefined): readonly Conditions[] {
+  const temperatures = valuesOf("--at", call.temperature, temperatureOf);
+  const pHs =
+    call.pH === undefined ? [pHOfMedium] : valuesOf("--pH", call.pH, (one) => numberOf("--pH", one, -2, 16, ""));
+  const concentrations =
+    call.concentration === undefined ? [undefined] : valuesOf("--conc", call.concentration, concentrationOf);
+  const count = temperatures.length * pHs.length * concentrations.length;
+  if (count > MOST_CONDITIONS)
+    throw new UsageError(
+      `the ranges make ${count} combinations; at most ${MOST_CONDITIONS} are computed: take fewer steps`,
+    );
+  return temperatures.flatMap((temperatureK) =>
+    pHs.flatMap((pH) =>
+      concentrations.map((concentration) => ({
+        temperatureK,
+        ...(pH === undefined ? {} : { pH }),
+        ...(concentration === undefined ? {} : { concentration }),
+      })),
+    ),
+  );
+}
+
+/** Prints an estimate, or a table of them over ranges. @returns 0 @throws UsageError naming the option or the structure and the mend */
 export async function estimateCommand(call: EstimateCall, streams: Streams): Promise<number> {
   const engine = new Engine();
-  const compound = await compoundOf(call.what, engine);
   const medium = readMedium(call.medium, engine.lexicon);
   if (!medium.ok) throw new UsageError(`--in: ${medium.problem}`);
-  const pH = call.pH === undefined ? medium.pH : numberOf("--pH", call.pH, -2, 16, "");
-  const concentration =
-    call.concentration === undefined
-      ? undefined
-      : numberOf("--conc", call.concentration.replace(/ ?(?:M|mol\/L)$/, ""), 0, 60, " mol/L");
-  const result = estimate(compound, {
+  const conditions = conditionsOf(call, medium.pH);
+  const compound = await compoundOf(call.what, engine);
+  const query = {
     input: call.what,
     mediumText: call.medium,
     medium: medium.amounts,
-    temperatureK: temperatureOf(call.temperature),
-    ...(pH === undefined ? {} : { pH }),
-    ...(concentration === undefined ? {} : { concentration }),
     correlationOnly: call.correlationOnly,
-  });
-  await streams.print(call.format === "json" ? `${JSON.stringify(result)}\n` : estimateAsText(result));
+  };
+  const estimates = conditions.map((one) => estimate(compound, { ...query, ...one }));
+  await streams.print(call.format === "json" ? asJson(estimates) : asText(estimates));
   return 0;
+}
+
+/** One estimate in the contract's shape; several as `estimates` of them. */
+function asJson(estimates: readonly Estimate[]): string {
+  return `${JSON.stringify(estimates.length === 1 ? estimates[0] : { schema: 1, estimates })}\n`;
+}
+
+function asText(estimates: readonly Estimate[]): string {
+  const [only] = estimates;
+  return estimates.length === 1 && only ? estimateAsText(only) : estimatesAsTable(estimates);
 }
