@@ -21,6 +21,7 @@ const STANDARD_K = 298.15;
 const TRACE_MOLARITY = 1e-10;
 /** mol/L of carbonyl from which on longer chains are looked for. */
 const CONCENTRATED = 0.1;
+const TWO_PHASES = "These solvents form two liquid phases; the shares are those of one mixed phase.";
 const NO_MEDIUM = "no medium is known here: name the solvent";
 
 interface Row {
@@ -77,9 +78,10 @@ function solve(contents: Contents, everyPartner: boolean, pH: number, options: S
     return { compound, amount, known, sets: own };
   });
   if (sets.length === 0 || !(vessel.volumeL > 0)) return { vessel, rows, of };
-  const solved = equilibrate(sets, vessel, contents.temperatureK, saltActivityOf(contents, vessel));
+  const saltActivity = saltActivityOf(contents, vessel);
+  const solved = equilibrate(sets, vessel, contents.temperatureK, saltActivity);
   const moves = sensitivities(solved);
-  return { vessel, rows, of, solved, forms: rows.map((row) => formShares(solved, row.sets, moves)) };
+  return { vessel, rows, of, solved, saltActivity, forms: rows.map((row) => formShares(solved, row.sets, moves)) };
 }
 
 type Solve = ReturnType<typeof solve>;
@@ -95,25 +97,25 @@ function reportRow(
   pH: number,
   found: Solve,
   beside: Solve | undefined,
+  twoPhases: boolean,
 ): CarbonylForms {
   const row = found.rows[index] as Row;
   if ("outside" in row.known) return outside(row.known.outside);
   if (found.vessel.composition.components.length === 0 || !found.solved) return outside(NO_MEDIUM);
   const forms = found.forms[index] as FormShare[];
   const more = beside?.solved && beside.forms[index];
-  const report = reportOf(
-    row.compound,
-    row.known,
-    contents,
-    pH,
-    found.solved,
-    forms,
-    cautionsOf(contents, row.compound, forms, more),
-  );
+  const cautions = cautionsOf(contents, row.compound, forms, more);
+  if (twoPhases) cautions.push(TWO_PHASES);
+  const report = reportOf(row.compound, row.known, contents, pH, found.solved, forms, cautions);
   // Not spread: the derivation is written only when it is read.
   return more?.some((form) => form.label.includes(" with "))
     ? Object.assign(report, { withPartners: { forms: more, free: freeOf(more) } })
     : report;
+}
+
+function withSalts(activity: Readonly<Record<string, number>>, saltActivity: number): Readonly<Record<string, number>> {
+  const water = activity.water;
+  return water === undefined || saltActivity === 1 ? activity : { ...activity, water: water * saltActivity };
 }
 
 /** The buffer's amine as a dissolved partner. */
@@ -140,9 +142,10 @@ export function speciate(contents: Contents, options: SpeciateOptions = {}): Spe
   const found = solve(vessel, false, pH, options);
   const beside = withPartners(vessel, pH, options, found);
   const { composition } = found.solved ?? found.vessel;
+  const { activity, twoPhases } = activitiesOf(composition, temperatureK);
   return {
-    carbonyls: found.of.map((index) => reportRow(index, vessel, pH, found, beside)),
-    activities: activitiesOf(composition, temperatureK).activity,
+    carbonyls: found.of.map((index) => reportRow(index, vessel, pH, found, beside, twoPhases)),
+    activities: withSalts(activity, found.saltActivity ?? saltActivityOf(vessel, found.vessel)),
     volumeL: contents.volumeL ?? found.vessel.composition.volumeL,
     settled: found.solved?.settled ?? true,
   };

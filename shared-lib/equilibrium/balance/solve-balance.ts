@@ -11,7 +11,12 @@ import { factorCholesky, solveCholesky } from "./linear.ts";
 export interface BalanceSystem {
   /** Number of components. */
   readonly components: number;
-  /** Stoichiometry, species by species: ν of each component, never negative. The free component itself is one of the species. */
+  /**
+   * Stoichiometry: species s holds `nu[k]` of the component `part[k]` for k from `first[s]` to below `first[s + 1]`, never negative.
+   * The free component itself is one of the species.
+   */
+  readonly first: Int32Array;
+  readonly part: Int32Array;
   readonly nu: Float64Array;
   /** ln of the amount (mol) of each species when every free amount is e⁰. */
   readonly lnA: Float64Array;
@@ -32,44 +37,75 @@ export const MOST_STEPS = 100;
 export const MOST_HALVINGS = 40;
 const MOST_SWEEPS = 60;
 const TOLERANCE = 1e-13;
+/** Squared norm below which a step that does not help is rounding. */
+const ROUNDING = 1e-22;
+/** Largest exponent, so that no amount overflows. */
+const HIGHEST = 600;
 /** Longest step of one unknown, e-folds. */
 const LONGEST = 30;
 
-function amountsAt(system: BalanceSystem, x: Float64Array, amounts: Float64Array, logs: Float64Array): number {
-  const { components: n, nu, lnA, totals } = system;
-  const sums = new Float64Array(n);
+/** Working arrays of one solution. */
+interface Scratch {
+  readonly amounts: Float64Array;
+  readonly sums: Float64Array;
+  readonly logs: Float64Array;
+  readonly trial: Float64Array;
+  readonly direction: Float64Array;
+  readonly gram: Gram;
+}
+
+/** Σ ν ν amount, scaled by 1/√sum on both sides so that traces and bulk weigh the same; its Cholesky factor. */
+export interface Gram {
+  readonly factor: Float64Array;
+  readonly scale: Float64Array;
+}
+
+export function emptyGram(components: number): Gram {
+  return { factor: new Float64Array(components * components), scale: new Float64Array(components) };
+}
+
+/** Amounts at x, the logs of the balances, and the squared norm of these. */
+function amountsAt(system: BalanceSystem, x: Float64Array, scratch: Scratch): number {
+  const { first, part, nu, lnA, totals } = system;
+  const { amounts, sums, logs } = scratch;
+  sums.fill(0);
+  let k = 0;
   for (let s = 0; s < amounts.length; s++) {
+    const end = first[s + 1] as number;
     let ln = lnA[s] as number;
-    for (let i = 0; i < n; i++) ln += (nu[s * n + i] as number) * (x[i] as number);
-    const amount = Math.exp(Math.min(ln, 600));
+    for (let q = k; q < end; q++) ln += (nu[q] as number) * (x[part[q] as number] as number);
+    const amount = Math.exp(ln < HIGHEST ? ln : HIGHEST);
     amounts[s] = amount;
-    for (let i = 0; i < n; i++) sums[i] = (sums[i] as number) + (nu[s * n + i] as number) * amount;
+    for (; k < end; k++) {
+      const i = part[k] as number;
+      sums[i] = (sums[i] as number) + (nu[k] as number) * amount;
+    }
   }
   let norm = 0;
-  for (let i = 0; i < n; i++) {
-    logs[i] = Math.log(Math.max(sums[i] as number, 1e-300) / (totals[i] as number));
-    norm += (logs[i] as number) ** 2;
+  for (let i = 0; i < sums.length; i++) {
+    const log = Math.log(Math.max(sums[i] as number, 1e-300) / (totals[i] as number));
+    logs[i] = log;
+    norm += log * log;
   }
   return norm;
 }
 
-/** Σ ν ν amount, scaled by 1/√(sum·sum) so that traces and bulk weigh the same; factored. */
-export function gramFactor(
-  system: BalanceSystem,
-  amounts: Float64Array,
-): { readonly factor: Float64Array; readonly scale: Float64Array } | undefined {
-  const { components: n, nu } = system;
-  const factor = new Float64Array(n * n);
-  const scale = new Float64Array(n);
+/** Builds and factors the scaled Gram matrix; false when rounding leaves it without a factor. */
+export function factorGram(system: BalanceSystem, amounts: Float64Array, gram: Gram): boolean {
+  const { components: n, first, part, nu } = system;
+  const { factor, scale } = gram;
+  factor.fill(0);
+  scale.fill(0);
   for (let s = 0; s < amounts.length; s++) {
     const amount = amounts[s] as number;
-    for (let i = 0; i < n; i++) {
-      const a = (nu[s * n + i] as number) * amount;
-      if (a === 0) continue;
+    const end = first[s + 1] as number;
+    for (let k = first[s] as number; k < end; k++) {
+      const i = part[k] as number;
+      const a = (nu[k] as number) * amount;
       scale[i] = (scale[i] as number) + a;
-      for (let j = 0; j <= i; j++) {
-        const b = nu[s * n + j] as number;
-        if (b !== 0) factor[i * n + j] = (factor[i * n + j] as number) + a * b;
+      for (let q = first[s] as number; q < end; q++) {
+        const at = i * n + (part[q] as number);
+        factor[at] = (factor[at] as number) + a * (nu[q] as number);
       }
     }
   }
@@ -77,42 +113,52 @@ export function gramFactor(
   for (let i = 0; i < n; i++)
     for (let j = 0; j <= i; j++)
       factor[i * n + j] = (factor[i * n + j] as number) * (scale[i] as number) * (scale[j] as number);
-  return factorCholesky(factor, n) ? { factor, scale } : undefined;
+  return factorCholesky(factor, n);
 }
 
-/** −J⁻¹·g of the log balances; undefined when the matrix cannot be factored. */
-function newtonDirection(system: BalanceSystem, amounts: Float64Array, logs: Float64Array): Float64Array | undefined {
-  const gram = gramFactor(system, amounts);
-  if (!gram) return undefined;
-  const n = system.components;
-  const direction = new Float64Array(n);
-  // J_log = diag(1/S)·G and G = diag(1/c)·M·diag(1/c) with c = 1/√S, so −J_log⁻¹ g = −c·M⁻¹·(c·S·g) = −c·M⁻¹·(g/c).
-  for (let i = 0; i < n; i++) direction[i] = -(logs[i] as number) / (gram.scale[i] as number);
-  solveCholesky(gram.factor, n, direction);
-  for (let i = 0; i < n; i++) {
+/** −J⁻¹·g of the log balances into `direction`; false when there is none. */
+function newtonDirection(system: BalanceSystem, scratch: Scratch): boolean {
+  const { amounts, logs, direction, gram } = scratch;
+  if (!factorGram(system, amounts, gram)) return false;
+  // J = diag(1/S)·G and G = diag(1/c)·M·diag(1/c) with c = 1/√S, so −J⁻¹·g = −c·M⁻¹·(g/c).
+  for (let i = 0; i < direction.length; i++) direction[i] = -(logs[i] as number) / (gram.scale[i] as number);
+  solveCholesky(gram.factor, direction.length, direction);
+  for (let i = 0; i < direction.length; i++) {
     const step = (direction[i] as number) * (gram.scale[i] as number);
-    if (!Number.isFinite(step)) return undefined;
+    if (!Number.isFinite(step)) return false;
     direction[i] = Math.max(-LONGEST, Math.min(LONGEST, step));
   }
-  return direction;
+  return true;
 }
 
-/** One pass of single-component Newton steps; each balance rises with its own unknown, so this never leaves its bracket. */
-function sweep(system: BalanceSystem, x: Float64Array, amounts: Float64Array, logs: Float64Array): number {
-  const { components: n, nu } = system;
-  for (let i = 0; i < n; i++) {
-    amountsAt(system, x, amounts, logs);
-    let sum = 0;
+/** One pass of single-balance Newton steps: each balance rises with its own unknown. */
+function sweep(system: BalanceSystem, x: Float64Array, scratch: Scratch): number {
+  const { first, part, nu } = system;
+  const { amounts, sums, logs } = scratch;
+  for (let i = 0; i < system.components; i++) {
+    amountsAt(system, x, scratch);
     let slope = 0;
-    for (let s = 0; s < amounts.length; s++) {
-      const v = nu[s * n + i] as number;
-      sum += v * (amounts[s] as number);
-      slope += v * v * (amounts[s] as number);
-    }
-    // slope/sum ≥ 1 whenever ν are whole numbers: the step never overshoots by more than the log itself.
-    if (slope > 0) x[i] = (x[i] as number) - ((logs[i] as number) * sum) / slope;
+    for (let s = 0; s < amounts.length; s++)
+      for (let k = first[s] as number; k < (first[s + 1] as number); k++)
+        if (part[k] === i) slope += (nu[k] as number) ** 2 * (amounts[s] as number);
+    if (slope > 0) x[i] = (x[i] as number) - ((logs[i] as number) * (sums[i] as number)) / slope;
   }
-  return amountsAt(system, x, amounts, logs);
+  return amountsAt(system, x, scratch);
+}
+
+/** Halves the Newton step until the norm falls; the new norm, or undefined when it never does. */
+function lineSearch(system: BalanceSystem, x: Float64Array, norm: number, scratch: Scratch): number | undefined {
+  const { trial, direction } = scratch;
+  let scale = 1;
+  for (let halving = 0; halving < MOST_HALVINGS; halving++, scale /= 2) {
+    for (let i = 0; i < x.length; i++) trial[i] = (x[i] as number) + scale * (direction[i] as number);
+    const next = amountsAt(system, trial, scratch);
+    if (next < norm * (1 - 1e-4 * scale)) {
+      x.set(trial);
+      return next;
+    }
+  }
+  return undefined;
 }
 
 /**
@@ -123,35 +169,28 @@ function sweep(system: BalanceSystem, x: Float64Array, amounts: Float64Array, lo
 export function solveBalance(system: BalanceSystem, start?: Float64Array): BalanceSolution {
   const n = system.components;
   const x = start ? Float64Array.from(start) : Float64Array.from(system.totals, (total) => Math.log(total));
-  const amounts = new Float64Array(system.lnA.length);
-  const logs = new Float64Array(n);
-  const trial = new Float64Array(n);
-  let norm = amountsAt(system, x, amounts, logs);
+  const scratch: Scratch = {
+    amounts: new Float64Array(system.lnA.length),
+    sums: new Float64Array(n),
+    logs: new Float64Array(n),
+    trial: new Float64Array(n),
+    direction: new Float64Array(n),
+    gram: emptyGram(n),
+  };
+  let norm = amountsAt(system, x, scratch);
   let steps = 0;
   let sweeps = 0;
   while (norm > TOLERANCE ** 2 && steps < MOST_STEPS) {
     steps++;
-    const direction = newtonDirection(system, amounts, logs);
-    let improved = false;
-    if (direction) {
-      let scale = 1;
-      for (let halving = 0; halving < MOST_HALVINGS && !improved; halving++, scale /= 2) {
-        for (let i = 0; i < n; i++) trial[i] = (x[i] as number) + scale * (direction[i] as number);
-        const next = amountsAt(system, trial, amounts, logs);
-        improved = next < norm * (1 - 1e-4 * scale);
-        if (improved) {
-          x.set(trial);
-          norm = next;
-        }
-      }
-    }
-    if (!improved) {
-      if (sweeps++ >= MOST_SWEEPS || norm < 1e-22) break;
-      norm = sweep(system, x, amounts, logs);
+    const next = newtonDirection(system, scratch) ? lineSearch(system, x, norm, scratch) : undefined;
+    if (next !== undefined) norm = next;
+    else {
+      if (sweeps++ >= MOST_SWEEPS || norm < ROUNDING) break;
+      norm = sweep(system, x, scratch);
     }
   }
-  amountsAt(system, x, amounts, logs);
+  amountsAt(system, x, scratch);
   let residual = 0;
-  for (let i = 0; i < n; i++) residual = Math.max(residual, Math.abs(logs[i] as number));
-  return { x, amounts, steps, residual };
+  for (let i = 0; i < n; i++) residual = Math.max(residual, Math.abs(scratch.logs[i] as number));
+  return { x, amounts: scratch.amounts, steps, residual };
 }

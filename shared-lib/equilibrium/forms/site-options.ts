@@ -32,30 +32,34 @@ export interface SiteOptions {
 }
 
 const { LN10 } = Math;
+/** Σσ⁺ below which the ring carries an amine. */
+const MOST_DONATING = -1;
 
 export const OPEN: SiteOption = { kind: "free carbonyl", label: "free carbonyl", ln: 0, errors: {} };
 
-/** How many sites of a molecule are like this one: a constant published for the molecule counts them all. */
-export function equivalentSites(sites: readonly CarbonylSite[], site: CarbonylSite): number {
-  return sites.filter(
-    (other) =>
-      other.class === site.class &&
-      other.hydrogens === site.hydrogens &&
-      Math.abs(other.sigmaStar - site.sigmaStar) < 1e-9,
-  ).length;
+function alike(a: CarbonylSite, b: CarbonylSite): boolean {
+  return a.class === b.class && a.hydrogens === b.hydrogens && Math.abs(a.sigmaStar - b.sigmaStar) < 1e-9;
 }
 
+/** Hydration constant of one site; a constant published for the molecule counts all the sites that are alike. */
 export function siteHydration(
   compound: Compound,
   site: CarbonylSite,
   state: ChargeState,
   conditions: Conditions,
 ): ConstantEstimate | NoConstant {
-  return hydrationConstant(compound.smiles, site, equivalentSites(compound.carbonyl?.sites ?? [], site), {
-    temperatureK: conditions.temperatureK,
-    state,
-    correlationOnly: conditions.correlationOnly,
-  });
+  const same = (compound.carbonyl?.sites ?? []).filter((other) => alike(other, site));
+  const leading = same.some((other) => other.leading);
+  return hydrationConstant(
+    compound.smiles,
+    leading === site.leading ? site : { ...site, leading },
+    Math.max(1, same.length),
+    {
+      temperatureK: conditions.temperatureK,
+      state,
+      correlationOnly: conditions.correlationOnly,
+    },
+  );
 }
 
 /** Perception of the site with its acid as carboxylate. */
@@ -63,9 +67,16 @@ function inState(site: CarbonylSite, state: ChargeState): CarbonylSite {
   return state === "anion" && site.acylKinds.includes("acid") ? { ...site, carboxylate: true } : site;
 }
 
+/** Diols that DMSO holds: of aryl trifluoromethyl ketones without N–H, and of 2-nitrobenzaldehyde (media README). */
+function hasAcidicDiol(site: CarbonylSite): boolean {
+  if (!site.aryl) return false;
+  if (site.class === "trifluoromethyl ketone") return site.aryl.sigmaPlus > MOST_DONATING;
+  return site.class === "aryl aldehyde" && site.aryl.ortho.includes("NO2");
+}
+
 function diolCorrection(site: CarbonylSite): MediumCorrection {
   if (site.class === "alpha-keto acid") return "diol of a keto acid";
-  return site.class === "trifluoromethyl ketone" && site.aryl ? "acidic diol" : "diol";
+  return hasAcidicDiol(site) ? "acidic diol" : "diol";
 }
 
 function hydrates(
@@ -167,7 +178,8 @@ function adducts(site: CarbonylSite, key: string, hydration: ConstantEstimate, c
 export function siteOptions(compound: Compound, site: CarbonylSite, conditions: Conditions): SiteOptions | NoConstant {
   const hydration = siteHydration(compound, site, "neutral", conditions);
   if ("outside" in hydration) return hydration;
-  const key = String(site.atom);
+  // Sites that are alike share their constant, and so its error.
+  const key = String((compound.carbonyl?.sites.find((other) => alike(other, site)) ?? site).atom);
   const options: SiteOption[] = [OPEN, ...hydrates(site, key, hydration, OPEN, conditions)];
   const ethers = hemiacetals(site, key, hydration, OPEN, conditions);
   options.push(...ethers.options);

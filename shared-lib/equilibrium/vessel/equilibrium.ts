@@ -60,21 +60,37 @@ function skeletonOf(sets: readonly VesselSet[], vessel: Vessel): Skeleton {
   });
   offsets.push(all.length);
   const count = all.length + ligands.length;
-  const nu = new Float64Array(count * components);
+  const first = new Int32Array(count + 1);
+  const part: number[] = [];
+  const nu: number[] = [];
   const baseLn = new Float64Array(count);
   const lnVolume = Math.log(volumeL);
   all.forEach((one, s) => {
-    nu[s * components + (owners[s] as number)] = one.units;
-    for (const { ligand, count: held } of one.holds) nu[s * components + (ligandIndex.get(ligand) as number)] = held;
+    part.push(owners[s] as number);
+    nu.push(one.units);
+    for (const { ligand, count: held } of one.holds) {
+      part.push(ligandIndex.get(ligand) as number);
+      nu.push(held);
+    }
+    first[s + 1] = part.length;
     baseLn[s] = one.ln + lnVolume;
   });
   ligands.forEach((ligand, i) => {
-    nu[(all.length + i) * components + sets.length + i] = 1;
+    part.push(sets.length + i);
+    nu.push(1);
+    first[all.length + i + 1] = part.length;
     baseLn[all.length + i] = Math.log(ligand.unit) + lnVolume;
   });
   const totals = Float64Array.from([...sets, ...ligands], ({ total }) => total);
   const names = [...new Set(all.flatMap((one) => one.corrections.map(({ name }) => name)))];
-  return { system: { components, nu, lnA: new Float64Array(count), totals }, baseLn, species: all, offsets, names };
+  const stoichiometry = { first, part: Int32Array.from(part), nu: Float64Array.from(nu) };
+  return {
+    system: { components, ...stoichiometry, lnA: new Float64Array(count), totals },
+    baseLn,
+    species: all,
+    offsets,
+    names,
+  };
 }
 
 function applyCorrections(skeleton: Skeleton, corrections: ReadonlyMap<MediumCorrection, Correction>): void {

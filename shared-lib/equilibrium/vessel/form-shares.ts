@@ -6,7 +6,7 @@
 
 import type { FormShare, Interval } from "../../model/contract.ts";
 import { solveCholesky } from "../balance/linear.ts";
-import { gramFactor } from "../balance/solve-balance.ts";
+import { emptyGram, factorGram } from "../balance/solve-balance.ts";
 import type { Species } from "../forms/species.ts";
 import type { VesselEquilibrium } from "./equilibrium.ts";
 
@@ -16,6 +16,18 @@ export const Z95 = 1.959964;
 const NOTHING = 1e-12;
 
 type Solved = VesselEquilibrium & { readonly species: readonly Species[] };
+
+/** What moves one species: source of error and d log10 K; the medium's errors are added with the corrections of the moment. */
+const listed = new WeakMap<Species, readonly (readonly [string, number])[]>();
+
+function errorsOf(species: Species): readonly (readonly [string, number])[] {
+  let list = listed.get(species);
+  if (!list) {
+    list = Object.entries(species.errors).filter(([, size]) => size !== 0);
+    listed.set(species, list);
+  }
+  return list;
+}
 
 /** Sources of error over all species: for each, d log10 K of every species. */
 function sourcesOf(solved: Solved): Map<string, Float64Array> {
@@ -30,9 +42,8 @@ function sourcesOf(solved: Solved): Map<string, Float64Array> {
     effect[s] = (effect[s] as number) + size;
   };
   solved.species.forEach((one, s) => {
-    for (const [source, size] of Object.entries(one.errors)) add(source, s, size);
-    for (const { name, count } of one.corrections)
-      add(`medium ${name}`, s, count * (solved.corrections.get(name)?.sd ?? 0));
+    for (const [source, size] of errorsOf(one)) add(source, s, size);
+    for (const { name, count } of one.corrections) add(name, s, count * (solved.corrections.get(name)?.sd ?? 0));
   });
   return sources;
 }
@@ -40,26 +51,30 @@ function sourcesOf(solved: Solved): Map<string, Float64Array> {
 /** d ln amount of every species for one standard deviation of each source. */
 export function sensitivities(solved: Solved): readonly Float64Array[] {
   const { system, solution } = solved;
-  const { components: n, nu } = system;
-  const gram = gramFactor(system, solution.amounts);
-  if (!gram) return [];
+  const { components: n, first, part, nu } = system;
+  const gram = emptyGram(n);
+  if (!factorGram(system, solution.amounts, gram)) return [];
+  const b = new Float64Array(n);
   const answers: Float64Array[] = [];
   for (const effect of sourcesOf(solved).values()) {
-    const b = new Float64Array(n);
+    b.fill(0);
     for (let s = 0; s < effect.length; s++) {
       const moved = (effect[s] as number) * Math.LN10 * (solution.amounts[s] as number);
       if (moved === 0) continue;
-      for (let i = 0; i < n; i++) b[i] = (b[i] as number) - (nu[s * n + i] as number) * moved;
+      for (let k = first[s] as number; k < (first[s + 1] as number); k++)
+        b[part[k] as number] = (b[part[k] as number] as number) - (nu[k] as number) * moved;
     }
     for (let i = 0; i < n; i++) b[i] = (b[i] as number) * (gram.scale[i] as number);
     solveCholesky(gram.factor, n, b);
-    const answer = new Float64Array(effect.length);
+    for (let i = 0; i < n; i++) b[i] = (b[i] as number) * (gram.scale[i] as number);
+    // The effect itself is no longer needed: the answer takes its place.
     for (let s = 0; s < effect.length; s++) {
       let sum = (effect[s] as number) * Math.LN10;
-      for (let i = 0; i < n; i++) sum += (nu[s * n + i] as number) * (b[i] as number) * (gram.scale[i] as number);
-      answer[s] = sum;
+      for (let k = first[s] as number; k < (first[s + 1] as number); k++)
+        sum += (nu[k] as number) * (b[part[k] as number] as number);
+      effect[s] = sum;
     }
-    answers.push(answer);
+    answers.push(effect);
   }
   return answers;
 }
@@ -106,17 +121,14 @@ export function formShares(solved: Solved, sets: readonly number[], moves: reado
     for (let s = solved.offsets[set] as number; s < (solved.offsets[set + 1] as number); s++) {
       const one = solved.species[s] as Species;
       const weight = (one.units * (solved.solution.amounts[s] as number)) / total;
-      for (const { share, ...form } of one.parts) {
-        const key = `${form.kind}|${form.label}`;
-        let into = gathered.get(key);
+      for (const part of one.parts) {
+        const { share } = part;
+        let into = gathered.get(part.label);
         if (!into) {
-          const { smiles, ...bare } = form;
-          into = {
-            form: smiles === undefined ? bare : { ...bare, smiles },
-            value: 0,
-            moves: new Float64Array(moves.length),
-          };
-          gathered.set(key, into);
+          const { kind, label, smiles } = part;
+          const form = smiles === undefined ? { kind, label } : { kind, label, smiles };
+          into = { form, value: 0, moves: new Float64Array(moves.length) };
+          gathered.set(label, into);
         }
         into.value += weight * share;
         for (let k = 0; k < moves.length; k++)
