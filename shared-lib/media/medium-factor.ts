@@ -182,7 +182,8 @@ export function hydrationFactor(composition: Composition, temperatureK: number, 
   const activity = waterActivity(composition, activities);
   const solvent = solventRule(shares, activity, activities.twoPhases, traits);
   const salt = saltRule(traits);
-  const ice = activity * (traits.saltActivity ?? 1) > iceActivity(temperatureK) + 0.01;
+  // Traces of water that freeze out of a cold organic liquid are no news.
+  const ice = shares.water > 0.05 && activity * (traits.saltActivity ?? 1) > iceActivity(temperatureK) + 0.01;
   return new LazyFactor(
     solvent.log10 + salt.log10,
     withTemperature(Math.hypot(solvent.sd, salt.sd), temperatureK),

@@ -1,6 +1,8 @@
 /** Media that come mixed: strengths of ethanol, denatured alcohol, wet solvents, dilute acids and bases. */
 
 import table from "../generated/stock-media.json" with { type: "json" };
+import type { MediumAmount } from "./composition.ts";
+import { solventByKey } from "./solvents.ts";
 
 export interface StockMedium {
   readonly key: string;
@@ -16,6 +18,25 @@ export interface StockMedium {
 }
 
 const ROWS = table as unknown as readonly StockMedium[];
+
+function plain(name: string): string {
+  return name.toLowerCase().replaceAll(" ", "");
+}
+
+const BY_NAME = new Map(ROWS.flatMap((row) => [row.key, ...row.synonyms].map((name) => [plain(name), row] as const)));
+
+/** The stock medium of that name; case and spaces do not matter ("95% EtOH", "Wet ether"). */
+export function stockMediumNamed(name: string): StockMedium | undefined {
+  return BY_NAME.get(plain(name));
+}
+
+/** mol of each solvent in a mass (g) of a stock medium. */
+export function stockAmounts(medium: StockMedium, massG: number): readonly MediumAmount[] {
+  return medium.parts.flatMap(([key, share]) => {
+    const solvent = solventByKey(key);
+    return solvent ? [{ solvent: key, amount: (massG * share) / solvent.molarMass }] : [];
+  });
+}
 
 export function allStockMedia(): readonly StockMedium[] {
   return ROWS;

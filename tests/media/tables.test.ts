@@ -3,7 +3,7 @@ import { createStructureToolkit } from "../../shared-lib/compounds/structure.ts"
 import { allBuffers, bufferByKey, bufferPH, usualPH } from "../../shared-lib/media/buffers.ts";
 import { allSalts } from "../../shared-lib/media/salts.ts";
 import { allSolvents, densityAt, molesInVolume, solventByKey } from "../../shared-lib/media/solvents.ts";
-import { allStockMedia } from "../../shared-lib/media/stock-media.ts";
+import { allStockMedia, stockAmounts, stockMediumNamed } from "../../shared-lib/media/stock-media.ts";
 import { hasGroups } from "../../shared-lib/media/unifac.ts";
 
 /** The last digit of a CAS registry number: the sum of the others, each times its place from the right, modulo 10. */
@@ -87,8 +87,20 @@ describe("salts and stock media", () => {
         expect(salt.osmotic[i]?.[0], salt.key).toBeGreaterThan(salt.osmotic[i - 1]?.[0] ?? 0);
     }
   });
+  it("are found by name and give amounts", () => {
+    const medium = stockMediumNamed("denatured EtOH");
+    expect(medium?.key).toBe("denatured ethanol");
+    const spirit = stockMediumNamed("95 % ETOH");
+    const amounts = spirit ? stockAmounts(spirit, 100) : [];
+    // 95 % by volume: mole fraction of water 0.173 (CRC Handbook densities, 20 °C).
+    const total = amounts.reduce((sum, { amount }) => sum + amount, 0);
+    expect((amounts.find(({ solvent }) => solvent === "water")?.amount ?? 0) / total).toBeCloseTo(0.173, 2);
+    expect(stockMediumNamed("ethanol")).toBeUndefined();
+  });
   it("name each thing once", () => {
-    const names = allStockMedia().flatMap(({ key, synonyms }) => [key, ...synonyms]);
+    const names = allStockMedia().flatMap(({ key, synonyms }) => [
+      ...new Set([key, ...synonyms].map((name) => name.toLowerCase().replaceAll(" ", ""))),
+    ]);
     expect(new Set(names).size).toBe(names.length);
   });
 });
