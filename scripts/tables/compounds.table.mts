@@ -90,6 +90,7 @@ function formOf(row: TableRow, known: ReadonlySet<string>) {
       release: row.cells.release,
       source: row.cells.source,
     },
+    usual: row.cells.usual === "yes",
     names: list(row.cells.names),
   };
 }

@@ -51,7 +51,11 @@ const COMPOUNDS = compoundTable as unknown as readonly {
   readonly compound: Compound;
   readonly names: readonly string[];
 }[];
-const FORMS = formTable as unknown as readonly { readonly form: SuppliedForm; readonly names: readonly string[] }[];
+const FORMS = formTable as unknown as readonly {
+  readonly form: SuppliedForm;
+  readonly usual: boolean;
+  readonly names: readonly string[];
+}[];
 
 /** Names of a bottle whose words alone do not make it the supplied form ("paraformaldehyde" does; an empty list does not). */
 class CatalogueLexicon implements Lexicon {
@@ -68,14 +72,15 @@ class CatalogueLexicon implements Lexicon {
       forms.push(form);
       this.#forms.set(form.of, forms);
     }
+    const usualForms = new Map(FORMS.filter(({ usual }) => usual).map(({ form }) => [form.of, form.id]));
     const solventBySmiles = new Map(allSolvents().map((solvent) => [solvent.smiles, solvent]));
     for (const { compound, names } of [...COMPOUNDS, ...extra]) {
       const solvent = solventBySmiles.get(compound.smiles);
-      const usual = this.#forms.get(compound.id)?.[0];
+      const usual = usualForms.get(compound.id);
       const whole: Compound = {
         ...compound,
         ...(solvent ? { solvent: solvent.key } : {}),
-        ...(usual && compound.density === undefined && usual.kind === "solution" ? { usualForm: usual.id } : {}),
+        ...(usual ? { usualForm: usual } : {}),
       };
       this.#addCompound(whole, names);
     }
@@ -267,6 +272,8 @@ function isMasked(text: string, end: number): boolean {
   const after = plainText(text.slice(end, end + 18)).toLowerCase();
   if (after[0] === "-" && isWordCharacter(after[1])) return !NOT_PART.some((word) => after.startsWith(word, 1));
   if (after[0] !== " " && after[0] !== "-") return false;
+  // "benzofuran-2,3-dione 2-[O-…]oxime": the name goes on behind the space.
+  if (/^ \d{1,2}'?-[[(]/.test(after)) return true;
   let i = end + 1;
   while (i < text.length && isLetter(text[i])) i++;
   return MASKING.has(text.slice(end + 1, i).toLowerCase());

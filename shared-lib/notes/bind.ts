@@ -106,14 +106,26 @@ interface Side {
   readonly inside: readonly number[];
 }
 
-/** Amounts of a bracket, unless another name in it has amounts of its own before the name that follows. */
+/** A volume that stands right before or right behind another name of the bracket is that name's ("in 20 mL THF"). */
+function isOfInner(items: readonly Item[], i: number, close: number): boolean {
+  const item = items[i];
+  if (!isAmount(item) || item.quantity.of !== "volume") return false;
+  const next =
+    items[i + 1]?.kind === "word" && (items[i + 1] as Item & { kind: "word" }).word === "of"
+      ? items[i + 2]
+      : items[i + 1];
+  if (next?.kind === "name" && next.end <= (items[close] as Item).start) return true;
+  return items[i - 1]?.kind === "name";
+}
+
+/** Amounts of a bracket without those of the names inside it. */
 function inBracket(items: readonly Item[], open: number, close: number, taken: ReadonlySet<number>): Side {
   const amounts: Quantity[] = [];
   const inside: number[] = [];
   for (let i = open + 1; i < close; i++) {
     const item = items[i] as Item;
     if (item.kind === "name") inside.push(i);
-    if (isAmount(item) && !taken.has(i)) amounts.push(item.quantity);
+    if (isAmount(item) && !taken.has(i) && !isOfInner(items, i, close)) amounts.push(item.quantity);
   }
   return { amounts, edge: close, inside };
 }

@@ -1,5 +1,6 @@
 /** Solvent phrases: "in water (20 mL) and methanol (5 mL)", "9:1 MeOH/H2O", "50% aq. EtOH", "PBS (pH 7.4)". */
 
+import { bufferByKey } from "../media/buffers.ts";
 import { type Composition, compositionOf, mediumKind } from "../media/composition.ts";
 import { densityAt, molarVolume, solventByKey } from "../media/solvents.ts";
 import type { MediumKind } from "../model/contract.ts";
@@ -57,7 +58,7 @@ function volumeOf(binding: Binding | undefined): number | undefined {
 /** Everything one solvent name says: itself, and water for "50 % aq. ethanol" or "1 M HCl". */
 function partsOf(item: Item & { kind: "name" }, binding: Binding | undefined, aqueous: boolean): MediumPart[] {
   const { compound } = item.match;
-  const solvent = compound.solvent as string;
+  const solvent = compound.buffer ?? (compound.solvent as string);
   const words = item.match.compound.name;
   const strength = binding?.amounts.find((amount) => amount.of === "assay");
   const mass = binding?.amounts.find((amount) => amount.of === "mass");
@@ -183,7 +184,10 @@ function mediumOf(
 export function amountsOf(parts: readonly MediumPart[]): { solvent: string; amount: number }[] {
   const anyVolume = parts.some((part) => part.volumeL !== undefined || part.massG !== undefined);
   return parts.flatMap((part) => {
-    const solvent = part.solvent === undefined ? undefined : solventByKey(part.solvent);
+    // A buffer is water as far as the composition goes.
+    const key = part.solvent;
+    const solvent =
+      key === undefined ? undefined : (solventByKey(key) ?? (bufferByKey(key) ? solventByKey("water") : undefined));
     if (!solvent) return [];
     const litres =
       part.volumeL ?? (part.massG === undefined ? undefined : part.massG / densityAt(solvent, 298.15) / 1000);

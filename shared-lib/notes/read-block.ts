@@ -45,7 +45,7 @@ function readAfresh(block: Block, lexicon: Lexicon, structures: StructureToolkit
   const charges = bindings.some(
     (binding) =>
       roles.get(binding.name) === "reagent" &&
-      binding.amounts.some((amount) => amount.of === "amount" || amount.of === "mass"),
+      binding.amounts.some((amount) => ["amount", "mass", "volume", "equivalents"].includes(amount.of)),
   );
   return { scan, bindings: byName, roles, media: readMedia(scan.items, byName, solvents), workUp, charges };
 }

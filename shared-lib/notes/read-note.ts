@@ -38,6 +38,8 @@ interface Draft {
   title: string | undefined;
   /** The step at hand has been worked up: the next charge begins another. */
   workedUp: boolean;
+  /** A heading stands before what comes now: it begins another step. */
+  headed: boolean;
   solvents: string[];
 }
 
@@ -49,6 +51,7 @@ function openStep(draft: Draft, start: number): void {
   const number = draft.steps.length + 1;
   draft.steps.push({ number, start, end: start, ...(draft.title ? { title: draft.title } : {}) });
   draft.workedUp = false;
+  draft.headed = false;
   draft.solvents = [];
 }
 
@@ -195,8 +198,11 @@ function readOne(draft: Draft, block: Block, options: ReadOptions): void {
   draft.problems.push(...reading.scan.problems.map((problem) => moved(problem, block.start)));
   if (block.kind === "heading") {
     draft.title = block.text.replace(/^[#\s]+/, "").trim();
-    draft.workedUp = true;
-  } else if (concernsFlask(reading) && (draft.steps.length === 0 || (draft.workedUp && reading.charges)))
+    draft.headed = true;
+  } else if (
+    concernsFlask(reading) &&
+    (draft.steps.length === 0 || draft.headed || (draft.workedUp && reading.charges))
+  )
     openStep(draft, block.start);
   const step = draft.steps.at(-1);
   const number = step?.number ?? 0;
@@ -238,6 +244,7 @@ export function readNote(text: string, options: ReadOptions): NoteReading {
     needsStructures: false,
     title: undefined,
     workedUp: false,
+    headed: false,
     solvents: [],
   };
   const readable = text.length > MOST_CHARACTERS ? text.slice(0, MOST_CHARACTERS) : text;

@@ -215,11 +215,16 @@ export function rolesOf(
   bindings: ReadonlyMap<number, Binding>,
 ): { readonly roles: ReadonlyMap<number, Role>; readonly workUp: number } {
   const roles = new Map<number, Role>();
+  // A solvent named in a charge's bracket without a volume says what the charge is dissolved in: it is no medium of its own.
+  const inside = new Set(
+    [...bindings.values()].flatMap((binding) => (binding.amounts.length > 0 ? binding.inside : [])),
+  );
   const workUpItem = block.kind === "table" || block.kind === "heading" ? items.length : findWorkUp(items);
   items.forEach((item, i) => {
     if (item.kind !== "name") return;
     if (block.kind === "heading") roles.set(i, item.match.compound.carbonyl ? "product" : "other");
     else if (i >= workUpItem) roles.set(i, isProduct(items, i) ? "product" : "other");
+    else if (inside.has(i) && (bindings.get(i)?.amounts.length ?? 0) === 0) roles.set(i, "other");
     else roles.set(i, roleOf(items, i, bindings.get(i)));
   });
   return { roles, workUp: items[workUpItem]?.start ?? block.text.length };
