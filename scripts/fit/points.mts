@@ -26,7 +26,8 @@ function pointOf(smiles: string, state: ChargeState): Point | undefined {
   if (!reading.ok || !reading.carbonyl) return undefined;
   const like = reading.carbonyl.sites.filter((site) => site.leading);
   const written = like[0];
-  if (!written || written.class === "beta-dicarbonyl") return undefined;
+  // Formaldehyde has no term of its own: it would be fitted on itself.
+  if (!written || written.class === "beta-dicarbonyl" || written.class === "formaldehyde") return undefined;
   const found = measuredConstant(smiles, written.class, state);
   if (!found) return undefined;
   const site = inChargeState(written, state);
