@@ -43,12 +43,13 @@ function sharesOf(components: readonly Component[]): Shares {
 /** Activity of component `i` when its mole fraction is `u` and the others keep their proportions. */
 function alongRay(model: LiquidModel, shares: Shares, i: number, u: number): number {
   const x = new Float64Array(shares.x.length);
-  const phi = new Float64Array(shares.x.length);
   const rest = (1 - u) / (1 - (shares.x[i] as number));
+  for (let j = 0; j < x.length; j++) x[j] = j === i ? u : (shares.x[j] as number) * rest;
+  if (!model.wetting) return u * Math.exp(lnGammasOf(model, x, shares.phi)[i] as number);
+  const phi = new Float64Array(x.length);
   let volume = 0;
   for (let j = 0; j < x.length; j++) {
     const own = shares.x[j] as number;
-    x[j] = j === i ? u : own * rest;
     phi[j] = own > 0 ? ((shares.phi[j] as number) / own) * (x[j] as number) : 0;
     volume += phi[j] as number;
   }
