@@ -22,7 +22,7 @@ export function shareOf(view: CarbonylView, kinds: readonly FormKind[]): Interva
 }
 
 /** The lower bound of the share must be at least this part of the share that the settings ask for. */
-const LEAST_SURE = 0.5;
+export const LEAST_SURE = 0.5;
 
 const FAMILIES: readonly (readonly FormKind[])[] = [
   ["hydrate", "hydrate anion"],

@@ -12,14 +12,14 @@ const SLOW_RELEASE_S = 3 * 3600;
 function lacking(view: CarbonylView): string | undefined {
   const { form } = view.charge;
   const tags = new Set(view.step.charges.flatMap((charge) => charge.compound.tags));
-  const acidOrBase =
-    tags.has("strong acid") || tags.has("acid") || tags.has("base") || tags.has("ammonia") || tags.has("catalyst");
+  const acid = tags.has("strong acid") || tags.has("acid") || tags.has("catalyst");
+  const acidOrBase = acid || tags.has("base") || tags.has("ammonia");
   const moments = view.step.moments.filter((moment) => moment.carbonylMentions.includes(view.charge.mention));
   const warmest = Math.max(0, ...moments.map((moment) => moment.contents.temperatureK));
   const held = moments.reduce((sum, moment) => sum + (moment.heldSeconds ?? 0), 0);
   switch (form?.release) {
     case "needs acid or base":
-      return acidOrBase ? undefined : "needs acid or base, and none is charged";
+      return acid ? undefined : "needs acid to come apart, and none is charged";
     case "on heating":
       return warmest >= WARM_K || acidOrBase || [...tags].some((tag) => tag.endsWith("amine"))
         ? undefined

@@ -62,7 +62,11 @@ export function decideStepKind(
   );
   if (seen && !restsOnAbsence(seen)) return { kind: seen, by: "partners" };
   const title = step?.title?.toLowerCase();
-  const titled = title ? STEP_KINDS.find((kind) => kind.words.some((word) => holdsWord(title, word))) : undefined;
+  const titled = title
+    ? STEP_KINDS.find(
+        (kind) => kind.words.some((word) => holdsWord(title, word)) && (!restsOnAbsence(kind) || kind.sees(facts)),
+      )
+    : undefined;
   if (titled) return { kind: titled, by: "title" };
   return seen ? { kind: seen, by: "partners" } : { by: "nothing" };
 }
