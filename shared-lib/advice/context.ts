@@ -66,12 +66,16 @@ function decisiveMoment(states: readonly SpeciatedMoment[]): SpeciatedMoment | u
   return main.findLast((state) => state.contents.solvents.length > 0) ?? main.at(-1) ?? states.at(-1);
 }
 
-/** The state in which the forms of a charge are told: the decisive one, or the last that holds it. */
-function stateOf(step: StepView, mention: number): SpeciatedMoment | undefined {
-  const { decisive } = step;
-  if (decisive?.carbonylMentions.includes(mention)) return decisive;
-  const holding = step.moments.filter((moment) => moment.carbonylMentions.includes(mention));
-  return holding.findLast((moment) => moment.contents.solvents.length > 0) ?? holding.at(-1);
+/** By mention, the last state that holds it, with a solvent if there is one such. */
+function lastStates(step: StepView): ReadonlyMap<number, SpeciatedMoment> {
+  const last = new Map<number, SpeciatedMoment>();
+  for (const moment of step.moments) {
+    const empty = moment.contents.solvents.length === 0;
+    for (const mention of moment.carbonylMentions) {
+      if (!empty || (last.get(mention)?.contents.solvents.length ?? 0) === 0) last.set(mention, moment);
+    }
+  }
+  return last;
 }
 
 function carbonylsOf(
@@ -79,11 +83,14 @@ function carbonylsOf(
   step: StepView,
   indices: ReadonlyMap<SpeciatedMoment, number>,
 ): readonly CarbonylView[] {
+  const last = lastStates(step);
+  const decided = new Set(step.decisive?.carbonylMentions);
   return step.charges.flatMap((charge) => {
     const mention = input.reading.mentions[charge.mention];
     const written = input.reading.charges[charge.charge];
     if (!charge.compound.carbonyl || !mention || !written || mention.role !== "reagent") return [];
-    const moment = stateOf(step, charge.mention);
+    // The decisive state if it holds the charge, for then the partners are in.
+    const moment = decided.has(charge.mention) ? step.decisive : last.get(charge.mention);
     const forms = moment?.speciation.carbonyls[moment.carbonylMentions.indexOf(charge.mention)];
     if (!moment || !forms) return [];
     return [{ charge, written, mention, step, moment, momentIndex: indices.get(moment) ?? 0, forms }];

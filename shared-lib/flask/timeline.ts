@@ -4,10 +4,13 @@ import type { Lexicon } from "../compounds/lexicon.ts";
 import type { Settings } from "../model/settings.ts";
 import type { NoteEvent, NoteReading } from "../notes/types.ts";
 import { resolveCharges } from "./resolve-charges.ts";
+import { saidOfSteps, withSaidAssays } from "./said-by-directive.ts";
 import type { FlaskMoment, FlaskTimeline, ResolvedCharge } from "./types.ts";
 import {
+  asSaid,
   contentsOf,
   emptyVessel,
+  isFull,
   poured,
   refluxTemperature,
   type Vessel,
@@ -19,6 +22,9 @@ import {
 
 const ZERO_CELSIUS_K = 273.15;
 
+/** States of one step that are followed. A step with more is no step, and each state is worked out in full. */
+const MOST_STATES = 200;
+
 /**
  * The charges of a note in real amounts, and its vessels after each event that changes one.
  * A quench or a work-up ends a step: what follows it in the same step is not followed.
@@ -26,7 +32,9 @@ const ZERO_CELSIUS_K = 273.15;
  * @param lexicon for the supplied forms; without it only forms that the words name are known
  */
 export function buildTimeline(reading: NoteReading, settings: Settings, lexicon?: Lexicon): FlaskTimeline {
-  const charges = resolveCharges(reading, lexicon);
+  const charges = resolveCharges({ ...reading, charges: withSaidAssays(reading) }, lexicon);
+  const said = saidOfSteps(reading, lexicon);
+  const states = new Map<number, number>();
   const byCharge = new Map(charges.map((charge) => [charge.charge, charge]));
   const room = settings.roomTemperatureC + ZERO_CELSIUS_K;
   const vessels = new Map<string, Vessel>();
@@ -38,11 +46,14 @@ export function buildTimeline(reading: NoteReading, settings: Settings, lexicon?
     if (event.kind === "hold") hold(moments, event.step, event.vessel, event.seconds);
     const key = keyOf(event.step, event.vessel);
     const before = vessels.get(key) ?? emptyVessel(room);
+    const number = states.get(event.step) ?? 0;
+    if (number >= MOST_STATES) continue;
     const after = afterEvent(before, event, reading, byCharge, vessels);
     if (after === before) continue;
     vessels.set(key, after);
     if (event.kind === "transfer") vessels.delete(keyOf(event.step, event.from));
-    moments.push(momentOf(after, event, index));
+    states.set(event.step, number + 1);
+    moments.push(momentOf(asSaid(after, said.get(event.step)), event, index));
   }
   return { charges, moments };
 }
@@ -61,11 +72,11 @@ function afterEvent(
   switch (event.kind) {
     case "charge": {
       const charge = charges.get(event.charge);
-      return charge ? withCharge(before, charge) : before;
+      return charge && !isFull(before) ? withCharge(before, charge) : before;
     }
     case "medium": {
       const phrase = reading.media[event.medium];
-      return phrase ? withMedium(before, phrase) : before;
+      return phrase && !isFull(before) ? withMedium(before, phrase) : before;
     }
     case "temperature": {
       const kelvin = event.reflux ? (refluxTemperature(before) ?? event.kelvin) : event.kelvin;

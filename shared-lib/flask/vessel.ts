@@ -9,6 +9,7 @@ import type { MediumPart, MediumPhrase } from "../notes/types.ts";
 import { pHFromCharges } from "./ph-from-charges.ts";
 import { phraseAmounts, type SolventAmount, solventOfPart } from "./phrase-amounts.ts";
 import { countsAsSolvent } from "./resolve-charges.ts";
+import type { SaidOfStep } from "./said-by-directive.ts";
 import type { ResolvedCharge } from "./types.ts";
 
 /** Where a note gives no volume, its largest carbonyl is taken to be 0.2 M (common practice, no source). */
@@ -71,6 +72,30 @@ export function withMedium(vessel: Vessel, phrase: MediumPhrase): Vessel {
 function alreadyIn(vessel: Vessel, key: string | undefined): boolean {
   const named = vessel.unsized.some((parts) => parts.some((part) => solventOfPart(part)?.key === key));
   return named || vessel.solvents.some((row) => row.solvent === key);
+}
+
+/** More than this in one vessel is no flask: what follows is left out, so that the time stays in bounds. */
+const MOST_CHARGES = 48;
+const MOST_SOLVENTS = 200;
+
+export function isFull({ charges, solvents, unsized }: Vessel): boolean {
+  return charges.length >= MOST_CHARGES || solvents.length + unsized.length >= MOST_SOLVENTS;
+}
+
+/** The vessel as the writer's directives have it; a medium takes the volume of what was read, or a usual one. */
+export function asSaid(vessel: Vessel, said: SaidOfStep | undefined): Vessel {
+  if (!said) return vessel;
+  const { temperatureK, pH, medium } = said;
+  const read = litresOf(allSolventsOf(vessel));
+  const litres = read > 0 ? read : USUAL_VOLUME_L;
+  const whole = medium ? litresOf(medium) : 0;
+  const solvents = medium?.map((row) => ({ solvent: row.solvent, amount: (row.amount * litres) / whole }));
+  return {
+    ...vessel,
+    ...(temperatureK === undefined ? {} : { temperatureK, temperatureStated: true }),
+    ...(pH === undefined ? {} : { pH, pHStated: true }),
+    ...(solvents && whole > 0 ? { solvents, unsized: [] } : {}),
+  };
 }
 
 export function withTemperature(vessel: Vessel, temperatureK: number): Vessel {

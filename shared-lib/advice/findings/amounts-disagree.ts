@@ -103,9 +103,12 @@ function lookAtEquivalents(context: AdviceContext, step: StepView, charge: Resol
   return [{ ...place, message, fixes }];
 }
 
+/** A step has no more charges than this; a longer list is no step. */
+const MOST_COUNTED = 50;
+
 /** Number of charges that agree on what one equivalent is; with fewer than two nobody knows which of them is off. */
 function agreeingCounts({ reading }: AdviceContext, { charges, equivalent }: StepView): number {
-  return charges.filter(({ charge }) => {
+  return charges.slice(0, MOST_COUNTED).filter(({ charge }) => {
     const source = reading.charges[charge];
     const { amount, equivalents } = source ? writtenQuantities(source) : {};
     return amount && equivalents && equivalent && agrees(amount.base / equivalents.base, equivalent.mol, 0, EXPLAINED);
