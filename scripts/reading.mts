@@ -144,11 +144,13 @@ for (const label of labels) {
     const right = media[0]?.kind === label.medium.kind || media.some((medium) => medium.kind === label.medium.kind);
     count("medium kind", right);
     const main = label.medium.main_components[0]?.toLowerCase() ?? "";
-    const names = media.flatMap((medium) =>
-      medium.components.map((component) => lexicon.find(component.name)?.compound),
-    );
-    const same = names.some(
-      (compound) => compound && "name" in compound && compound.smiles === (lexicon.find(main)?.compound.smiles ?? "?"),
+    const smilesOf = (name: string): string | undefined => {
+      const match = lexicon.find(name);
+      return match && match !== "needs structures" ? match.compound.smiles : undefined;
+    };
+    const wantedMain = smilesOf(main);
+    const same = media.some((medium) =>
+      medium.components.some(({ name }) => wantedMain !== undefined && smilesOf(name) === wantedMain),
     );
     if (main !== "") count("medium main component", same);
     if ((!right || (main !== "" && !same)) && verbose)

@@ -265,7 +265,7 @@ class Reader {
     if (!places) return undefined;
     const molecule = parent.molecule.copy();
     const saturated = [...prefixes.hydro, ...(added ? [added] : [])];
-    const ketone = suffix.word.endsWith("one");
+    const ketone = suffix.word === "one" || suffix.word === "dione" || suffix.word === "trione";
     if (!hydrogenate(molecule, parent, saturated, ketone ? places : [])) return undefined;
     const oxygens = places.flatMap((atom) => suffix.add(molecule, atom));
     if (!this.#esterify(molecule, suffix.word.endsWith("ate") ? oxygens : [])) return undefined;
@@ -433,7 +433,7 @@ function saltOf(text: string): string | undefined {
   const behind = /^(.+ic acid),? (sodium|potassium|lithium|cesium) salt$/.exec(text);
   const metal = METALS[before?.[1] ?? behind?.[2] ?? ""];
   if (metal === undefined) return undefined;
-  const name = before ? (before[2] as string) : (behind?.[1] as string).replace(/ic acid$/, "ate");
+  const name = before?.[2] ?? behind?.[1]?.replace(/ic acid$/, "ate") ?? "";
   // The anion's oxygen is written as that of an ester of astatine, which no name holds, and the bond is then cut.
   const mark = new Molecule();
   mark.addAtom("At");

@@ -18,7 +18,7 @@ const TABLE: Readonly<Record<string, number>> = taft;
 /** σ* of a heteroatom whatever it carries, by element, for groups that the table lacks. */
 const BARE: Readonly<Record<string, number>> = {
   O: 1.77,
-  N: 0.7,
+  N: 0.9,
   S: 1.56,
   F: 3.19,
   Cl: 2.94,
@@ -30,14 +30,14 @@ const BARE: Readonly<Record<string, number>> = {
   Se: 1.5,
 };
 
-/**
- * A CH2 between group and carbon passes on this share of σ* (Taft's 1/2.8). Through a carbon that only lengthens the
- * chain, an alkyl costs 0.10: that reproduces the table's alkyls (C2H5 −0.10, i-C3H7 −0.19, t-C4H9 −0.30).
- */
+/** A heteroatom on the α carbon passes on this share of its σ* (Taft's 1/2.8). */
 const ATTENUATION = 0.36;
-const CARBON_ATTENUATION = 0.4;
+/** The same for a withdrawing carbon group: CH2CH2OH 0.21 from CH2OH 0.56, CH2CH2Cl 0.39 from CH2Cl 1.01, CH2Ph 0.22 from Ph 0.61. */
+const CARBON_ATTENUATION = 0.37;
+/** A carbon that only lengthens or branches the chain donates: C2H5 −0.10, i-C3H7 −0.19, t-C4H9 −0.30; less where it is tied in a ring. */
 const PER_CARBON = -0.1;
-/** Donation of alkyls further out dies away faster: n-C3H7 −0.12, n-C5H11 −0.14, cyclo-C6H11 −0.18. */
+const PER_RING_CARBON = -0.07;
+/** Donation of alkyls further out dies away faster: n-C3H7 −0.12, n-C5H11 −0.14. */
 const ALKYL_ATTENUATION = 0.15;
 /** Three strong groups on one carbon fall short of additivity: CCl3 2.65 and CF3 2.61 against a sum of 3.2 and 3.4. */
 const SATURATION = [1, 1, 0.95, 0.8] as const;
@@ -58,7 +58,8 @@ function carbonGroup(graph: MoleculeGraph, index: number, from: number, depth: n
     const element = atomAt(graph, bond.atom).element;
     const sigma = depth >= DEEPEST ? 0 : groupSigma(graph, bond.atom, index, depth + 1).sigma;
     if (element !== "C") sum += ATTENUATION * sigma;
-    else sum += PER_CARBON + (sigma < 0 ? ALKYL_ATTENUATION * Math.max(sigma, -0.3) : CARBON_ATTENUATION * sigma);
+    else if (sigma > 0) sum += CARBON_ATTENUATION * sigma;
+    else sum += (bond.inRing ? PER_RING_CARBON : PER_CARBON) + ALKYL_ATTENUATION * Math.max(sigma, -0.3);
     if (sigma > 2) strong++;
   }
   return sum * (SATURATION[Math.min(strong, 3)] ?? 1);
@@ -80,32 +81,35 @@ function acylGroup(graph: MoleculeGraph, index: number, from: number): number {
   for (const bond of othersOf(graph, index, from)) {
     const atom = atomAt(graph, bond.atom);
     if (bond.order === 2) continue;
-    if (atom.element === "O") return atom.charge < 0 ? -1.06 : 2.63;
-    if (atom.element === "N") return 0.8;
-    if (BARE[atom.element] !== undefined) return 2.6;
+    if (atom.element === "O") return atom.charge < 0 ? -1.06 : 2.84;
+    if (atom.element === "N") return 0.84;
+    if (BARE[atom.element] !== undefined) return 2.8;
   }
-  return 1.5;
+  return 1.65;
 }
 
 function groupSigma(graph: MoleculeGraph, index: number, from: number, depth: number): SigmaStar {
-  if (depth > 0 && hasOxo(graph, index) && atomAt(graph, index).element === "C")
-    return { sigma: acylGroup(graph, index, from), extrapolated: true };
-  const signature = groupSignature(graph, index, from);
+  // An acyl group is never read from the table here: what counts is how it acts over the chain.
+  const acyl = depth > 0 && atomAt(graph, index).element === "C" && hasOxo(graph, index);
+  const signature = acyl ? undefined : groupSignature(graph, index, from);
   const tabled = signature === undefined ? undefined : TABLE[signature];
   if (tabled !== undefined) return { sigma: tabled, extrapolated: false };
+  return { sigma: composed(graph, index, from, depth), extrapolated: true };
+}
+
+/** From the parts of the group, each of which may be in the table. */
+function composed(graph: MoleculeGraph, index: number, from: number, depth: number): number {
   const atom = atomAt(graph, index);
-  if (atom.element !== "C") {
-    const bare = BARE[atom.element] ?? 0;
-    const oxidised = othersOf(graph, index, from).filter((bond) => bond.order === 2).length;
-    const acylated = othersOf(graph, index, from).some((bond) => bond.order === 1 && hasOxo(graph, bond.atom));
-    const sigma =
-      bare +
-      (atom.element === "S" || atom.element === "P" ? oxidised : 0) +
-      (acylated ? 0.7 : 0) +
-      (atom.charge > 0 ? 3.5 : 0);
-    return { sigma, extrapolated: true };
-  }
-  return { sigma: carbonGroup(graph, index, from, depth), extrapolated: true };
+  if (atom.element === "C") return carbonGroup(graph, index, from, depth);
+  const others = othersOf(graph, index, from);
+  const oxidised = others.filter((bond) => bond.order === 2).length;
+  const acylated = others.some((bond) => bond.order === 1 && hasOxo(graph, bond.atom));
+  return (
+    (BARE[atom.element] ?? 0) +
+    (atom.element === "S" || atom.element === "P" ? oxidised : 0) +
+    (acylated ? 0.7 : 0) +
+    (atom.charge > 0 ? 3.5 : 0)
+  );
 }
 
 /**
@@ -114,4 +118,9 @@ function groupSigma(graph: MoleculeGraph, index: number, from: number, depth: nu
  */
 export function sigmaStarOf(graph: MoleculeGraph, index: number, from: number): SigmaStar {
   return groupSigma(graph, index, from, 0);
+}
+
+/** σ* put together from the group's parts even where the table holds the group: what the estimate of an unknown group is worth. */
+export function sigmaStarFromParts(graph: MoleculeGraph, index: number, from: number): number {
+  return composed(graph, index, from, 0);
 }
