@@ -169,8 +169,8 @@ const PER_SIGMA_STAR = 0.1;
 const SECOND_HYDROGEN = 0.4;
 /** An ortho group, two at most. */
 const PER_ORTHO = 0.25;
-/** σ* put together from parts. */
-const FROM_PARTS = 0.1;
+/** σ* put together from parts misses the table's by 0.11 (root mean square over 70 groups, tests/compounds/perception), times the slope. */
+const FROM_PARTS = 0.18;
 
 /** Variance on log10 K beyond the fit's own: what the descriptors leave open. */
 export function extraVariance(site: CarbonylSite): number {
