@@ -32,7 +32,16 @@ function worstOf(report: FileReport): number {
   return report.findings.reduce((worst, { severity }) => Math.max(worst, SEVERITY_RANK[severity]), 0);
 }
 
+/** A longer text is no note; its analysis would cost more than it tells. UTF-16 code units. */
+const LONGEST_NOTE = 2_000_000;
+
 let engine: Engine | undefined;
+
+/** Why a text is not taken for a note. */
+export function tooLong(text: string): string | undefined {
+  if (text.length <= LONGEST_NOTE) return undefined;
+  return `it has ${text.length} characters, more than the ${LONGEST_NOTE} of the longest note: split it`;
+}
 
 /** Analyses a text and renders its piece. */
 export async function checkText(text: string, name: string, format: ReportFormat): Promise<CheckedPiece> {
@@ -47,6 +56,8 @@ export async function checkText(text: string, name: string, format: ReportFormat
 export async function checkFile({ file, format, cache }: CheckTask): Promise<CheckedFile> {
   const read = await readText(file);
   if (!read.ok) return read;
+  const problem = tooLong(read.text);
+  if (problem !== undefined) return { ok: false, problem };
   try {
     const key = cache === undefined ? undefined : keyOf(file, format, read.text);
     const kept = cache !== undefined && key !== undefined ? await cachedPiece(cache, key) : undefined;

@@ -4,7 +4,7 @@ import type { Severity } from "../../shared-lib/model/contract.ts";
 import { type ReportFormat, WRITERS } from "../../shared-lib/report/formats.ts";
 import { addSummary } from "../../shared-lib/report/summary.ts";
 import type { ReportWriter } from "../../shared-lib/report/writer.ts";
-import { type CheckedPiece, checkText, SEVERITY_RANK } from "./check-file.ts";
+import { type CheckedPiece, checkText, SEVERITY_RANK, tooLong } from "./check-file.ts";
 import { checkFiles, threadsFor } from "./check-files.ts";
 import { findNotes } from "./find-notes.ts";
 import { timeLeft } from "./progress.ts";
@@ -70,6 +70,8 @@ function statusOf(worst: number, failOn: CheckCall["failOn"]): number {
 export async function checkStdin(name: string, call: CheckCall, streams: Streams): Promise<number> {
   const read = textOfBytes(await readAll(streams.input));
   if (!read.ok) throw new UsageError(`${name}: ${read.problem}`);
+  const problem = tooLong(read.text);
+  if (problem !== undefined) throw new UsageError(`${name}: ${problem}`);
   const out = new ReportOut(call.format, streams);
   await out.begin();
   await out.add(await checkText(read.text, name, call.format));

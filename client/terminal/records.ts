@@ -2,6 +2,7 @@
 
 import { createInterface } from "node:readline";
 import { toFileReport } from "../../shared-lib/report/file-report.ts";
+import { tooLong } from "./check-file.ts";
 import { Engine } from "./engine.ts";
 import type { Streams } from "./streams.ts";
 
@@ -28,6 +29,8 @@ function nameOf(id: unknown): string {
 async function answer(line: string, engine: Engine): Promise<object> {
   const record = recordOf(line);
   if ("error" in record) return record;
+  const problem = tooLong(record.text);
+  if (problem !== undefined) return { id: record.id, error: problem };
   try {
     const analysis = await engine.analyze(record.text, nameOf(record.id));
     return { id: record.id, ...toFileReport(record.id === null ? "" : String(record.id), analysis) };
