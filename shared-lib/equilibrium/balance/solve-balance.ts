@@ -2,8 +2,9 @@
  * The coupled mass balance of any number of components: Σ over species of ν·amount = total, with amount = exp(lnA + ν·x).
  *
  * The unknowns are x = ln of the free amounts. Newton's method works on the logarithms of the balances, which are nearly straight lines
- * in x, with a line search on their norm: the Jacobian is a Gram matrix divided by the sums, never singular, so every Newton direction
- * leads downhill. Where rounding stops it, single balances are solved in turn. Both loops have a fixed bound.
+ * in x, with a line search on their norm; where that fails (once in a thousand random systems with constants over 50 powers of ten), it
+ * starts anew on the convex potential whose gradient the balances are, which has one minimum. Every loop has a fixed bound: at most
+ * 3 × MOST_STEPS steps in all.
  */
 
 import { factorCholesky, solveCholesky } from "./linear.ts";
@@ -39,6 +40,10 @@ const MOST_SWEEPS = 60;
 const TOLERANCE = 1e-13;
 /** Squared norm below which a step that does not help is rounding. */
 const ROUNDING = 1e-22;
+/** Largest |ln(sum/total)| of a good solution. */
+const SOUND = 1e-9;
+/** ln of a sum over its total from which on a start is lowered first. */
+const FAR = 3;
 /** Largest exponent, so that no amount overflows. */
 const HIGHEST = 600;
 /** Longest step of one unknown, e-folds. */
@@ -74,7 +79,7 @@ function amountsAt(system: BalanceSystem, x: Float64Array, scratch: Scratch): nu
     const end = first[s + 1] as number;
     let ln = lnA[s] as number;
     for (let q = k; q < end; q++) ln += (nu[q] as number) * (x[part[q] as number] as number);
-    const amount = Math.exp(ln < HIGHEST ? ln : HIGHEST);
+    const amount = Math.exp(Math.min(ln, HIGHEST));
     amounts[s] = amount;
     for (; k < end; k++) {
       const i = part[k] as number;
@@ -123,11 +128,15 @@ function newtonDirection(system: BalanceSystem, scratch: Scratch): boolean {
   // J = diag(1/S)·G and G = diag(1/c)·M·diag(1/c) with c = 1/√S, so −J⁻¹·g = −c·M⁻¹·(g/c).
   for (let i = 0; i < direction.length; i++) direction[i] = -(logs[i] as number) / (gram.scale[i] as number);
   solveCholesky(gram.factor, direction.length, direction);
+  let longest = 0;
   for (let i = 0; i < direction.length; i++) {
-    const step = (direction[i] as number) * (gram.scale[i] as number);
-    if (!Number.isFinite(step)) return false;
-    direction[i] = Math.max(-LONGEST, Math.min(LONGEST, step));
+    direction[i] = (direction[i] as number) * (gram.scale[i] as number);
+    longest = Math.max(longest, Math.abs(direction[i] as number));
   }
+  if (!Number.isFinite(longest)) return false;
+  // Shortened as a whole: a direction bent at one unknown would no longer lead downhill.
+  if (longest > LONGEST)
+    for (let i = 0; i < direction.length; i++) direction[i] = ((direction[i] as number) * LONGEST) / longest;
   return true;
 }
 
@@ -162,6 +171,88 @@ function lineSearch(system: BalanceSystem, x: Float64Array, norm: number, scratc
 }
 
 /**
+ * Lowers all unknowns alike until no sum is above its total (each sum falls at least as fast): there the free parts keep the Gram matrix
+ * well conditioned, where a species far above every total would drown them.
+ */
+function lowered(system: BalanceSystem, x: Float64Array, scratch: Scratch): number {
+  const norm = amountsAt(system, x, scratch);
+  let most = 0;
+  for (const log of scratch.logs) most = Math.max(most, log);
+  if (!(most > FAR)) return norm;
+  for (let i = 0; i < x.length; i++) x[i] = (x[i] as number) - most;
+  return amountsAt(system, x, scratch);
+}
+
+function worstOf(logs: Float64Array): number {
+  let worst = 0;
+  for (const log of logs) worst = Math.max(worst, Math.abs(log));
+  return worst;
+}
+
+/** Newton on the logs of the balances; the number of steps. The amounts and logs in `scratch` are those at the last x. */
+function newtonOnLogs(system: BalanceSystem, x: Float64Array, scratch: Scratch): number {
+  let norm = lowered(system, x, scratch);
+  let steps = 0;
+  let sweeps = 0;
+  while (norm > TOLERANCE ** 2 && steps < MOST_STEPS) {
+    steps++;
+    const next = newtonDirection(system, scratch) ? lineSearch(system, x, norm, scratch) : undefined;
+    if (next !== undefined) norm = next;
+    else {
+      if (sweeps++ >= MOST_SWEEPS || norm < ROUNDING) break;
+      norm = sweep(system, x, scratch);
+    }
+  }
+  amountsAt(system, x, scratch);
+  return steps;
+}
+
+/** Σ amounts − Σ total·x: convex in x, with the balances as its gradient, so its one minimum is the solution. */
+function potential(system: BalanceSystem, x: Float64Array, amounts: Float64Array): number {
+  let sum = 0;
+  for (const amount of amounts) sum += amount;
+  for (let i = 0; i < x.length; i++) sum -= (system.totals[i] as number) * (x[i] as number);
+  return sum;
+}
+
+/** Damped Newton on the convex potential, for the rare system where the logs lead into a narrow valley; the number of steps. */
+function newtonOnPotential(system: BalanceSystem, x: Float64Array, scratch: Scratch): number {
+  const { sums, direction, trial, gram, amounts } = scratch;
+  lowered(system, x, scratch);
+  let value = potential(system, x, amounts);
+  let steps = 0;
+  while (steps < MOST_STEPS) {
+    steps++;
+    if (!factorGram(system, amounts, gram)) break;
+    for (let i = 0; i < x.length; i++)
+      direction[i] = ((system.totals[i] as number) - (sums[i] as number)) * (gram.scale[i] as number);
+    const gradient = Float64Array.from(direction);
+    solveCholesky(gram.factor, x.length, direction);
+    let slope = 0;
+    let longest = 0;
+    for (let i = 0; i < x.length; i++) {
+      slope -= (gradient[i] as number) * (direction[i] as number);
+      direction[i] = (direction[i] as number) * (gram.scale[i] as number);
+      longest = Math.max(longest, Math.abs(direction[i] as number));
+    }
+    let scale = Math.min(1, LONGEST / Math.max(longest, 1e-300));
+    let improved = false;
+    for (let halving = 0; halving < MOST_HALVINGS && !improved; halving++, scale /= 2) {
+      for (let i = 0; i < x.length; i++) trial[i] = (x[i] as number) + scale * (direction[i] as number);
+      amountsAt(system, trial, scratch);
+      const next = potential(system, trial, amounts);
+      improved = next < value + 1e-4 * scale * slope;
+      if (improved) {
+        x.set(trial);
+        value = next;
+      }
+    }
+    if (!improved) break;
+  }
+  return steps;
+}
+
+/**
  * Solves the balances; always ends, and always gives finite amounts.
  *
  * @param start first guess of x; without one, every component is taken as free
@@ -177,20 +268,11 @@ export function solveBalance(system: BalanceSystem, start?: Float64Array): Balan
     direction: new Float64Array(n),
     gram: emptyGram(n),
   };
-  let norm = amountsAt(system, x, scratch);
-  let steps = 0;
-  let sweeps = 0;
-  while (norm > TOLERANCE ** 2 && steps < MOST_STEPS) {
-    steps++;
-    const next = newtonDirection(system, scratch) ? lineSearch(system, x, norm, scratch) : undefined;
-    if (next !== undefined) norm = next;
-    else {
-      if (sweeps++ >= MOST_SWEEPS || norm < ROUNDING) break;
-      norm = sweep(system, x, scratch);
-    }
+  let steps = newtonOnLogs(system, x, scratch);
+  if (worstOf(scratch.logs) > SOUND) {
+    x.set(system.totals.map((total) => Math.log(total)));
+    steps += newtonOnPotential(system, x, scratch) + newtonOnLogs(system, x, scratch);
   }
   amountsAt(system, x, scratch);
-  let residual = 0;
-  for (let i = 0; i < n; i++) residual = Math.max(residual, Math.abs(scratch.logs[i] as number));
-  return { x, amounts: scratch.amounts, steps, residual };
+  return { x, amounts: scratch.amounts, steps, residual: worstOf(scratch.logs) };
 }

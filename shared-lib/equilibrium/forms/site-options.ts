@@ -184,8 +184,6 @@ export function siteOptions(compound: Compound, site: CarbonylSite, conditions: 
   const ethers = hemiacetals(site, key, hydration, OPEN, conditions);
   options.push(...ethers.options);
   const lines: DerivationLine[] = [];
-  let shown = hydration;
-  let alcohols = ethers.alcohols;
   const charged = chargedReference(compound, site, hydration, conditions);
   if (charged) {
     const written = inState(site, charged.state);
@@ -193,13 +191,10 @@ export function siteOptions(compound: Compound, site: CarbonylSite, conditions: 
     const more = hemiacetals(written, own, charged.hydration, charged.option, conditions);
     options.push(charged.option, ...hydrates(written, own, charged.hydration, charged.option, conditions));
     options.push(...more.options);
-    if (charged.option.ln > 0) {
-      shown = charged.hydration;
-      alcohols = more.alcohols;
-    }
+    const shown = (constant: ConstantEstimate): string => constant.log10.toFixed(2).replace("-", "−");
     lines.push({
-      says: `At pH ${conditions.pH.toFixed(1)} the ${charged.state} and the uncharged form each count with their own constants`,
-      value: `log K ${charged.hydration.log10.toFixed(2)} and ${hydration.log10.toFixed(2)}`.replaceAll("-", "−"),
+      says: `At pH ${conditions.pH.toFixed(1)} the ${charged.option.ln > 0 ? charged.state : "uncharged form"} dominates; each state counts with its own constant`,
+      value: `log K ${shown(hydration)} uncharged, ${shown(charged.hydration)} ${charged.state}`,
     });
   }
   const ring = ringClosure(site, compound.smiles, conditions.temperatureK, conditions.correlationOnly);
@@ -216,11 +211,11 @@ export function siteOptions(compound: Compound, site: CarbonylSite, conditions: 
   const others = adducts(site, key, hydration, conditions);
   options.push(...others.options);
   lines.push(...others.lines);
-  const lead = { says: `${site.class}${shown.method === "measured" ? ", measured for this compound" : ""}` };
+  const lead = { says: `${site.class}${hydration.method === "measured" ? ", measured for this compound" : ""}` };
   return {
     site,
     options,
-    constants: { site, hydration: shown, alcohols },
-    lines: [lead, ...shown.lines, ...lines, ...alcohols.flatMap(({ constant }) => constant.lines)],
+    constants: { site, hydration, alcohols: ethers.alcohols },
+    lines: [lead, ...hydration.lines, ...lines, ...ethers.alcohols.flatMap(({ constant }) => constant.lines)],
   };
 }

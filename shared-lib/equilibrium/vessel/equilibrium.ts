@@ -125,6 +125,7 @@ export function equilibrate(
   const waterAt = sets.length + vessel.ligands.findIndex((ligand) => ligand.name === "water");
   const carbonyls = sets.reduce((sum, set) => sum + set.total, 0);
   const least = Math.min(...vessel.ligands.map((ligand) => ligand.total));
+  const filled = 1 - vessel.composition.volumeL / vessel.volumeL;
   const trace = !(carbonyls > TRACE * least);
   let composition = vessel.composition;
   let start: Float64Array = startOf(sets, vessel);
@@ -136,7 +137,7 @@ export function equilibrate(
     passes++;
     const freeWater = Math.exp(start[waterAt] ?? 0);
     const next = new Map(
-      names.map((name) => [name, correctionOf(name, composition, temperatureK, saltActivity, freeWater)]),
+      names.map((name) => [name, correctionOf(name, composition, temperatureK, saltActivity, filled, freeWater)]),
     );
     // A second half of the way, once the simple passes have had their turn, stills a pair of values that would swing.
     const part = passes > MOST_PASSES / 4 ? 0.5 : 1;

@@ -6,6 +6,9 @@ import type { MediumCorrection } from "../forms/species.ts";
 import { WATER } from "../forms/species.ts";
 import type { Vessel } from "./ligands.ts";
 
+/** Error of log10 where the carbonyl itself is the medium: neat mixtures of heptanal and methanol bind about half a unit more. */
+const CARBONYL_AS_MEDIUM_SD = 0.35;
+
 export interface Correction {
   readonly ln: number;
   /** Error of log10. */
@@ -33,6 +36,7 @@ function volumeShare(composition: Composition, name: string): number {
  * The correction of that name. The medium's rule speaks of the whole ratio against the pure liquid; mass action already has the
  * ligand's concentration, so its volume share is taken out again.
  *
+ * @param filled share of the volume that carbonyls fill, which the medium's rule does not see
  * @param freeWater free water relative to pure water, for condensations
  */
 export function correctionOf(
@@ -40,6 +44,7 @@ export function correctionOf(
   composition: Composition,
   temperatureK: number,
   saltActivity: number,
+  filled: number,
   freeWater: number,
 ): Correction {
   if (name === "condensed") return { ln: -Math.log(Math.max(freeWater, 1e-3)), sd: 0 };
@@ -54,5 +59,6 @@ export function correctionOf(
       : hemiacetalFactor(composition, ligand, temperatureK);
   const share = volumeShare(composition, ligand);
   if (!Number.isFinite(factor.log10) || !(share > 0)) return { ln: 0, sd: 0 };
-  return { ln: Math.LN10 * factor.log10 - Math.log(share), sd: factor.sd, factor };
+  const sd = Math.hypot(factor.sd, CARBONYL_AS_MEDIUM_SD * filled);
+  return { ln: Math.LN10 * factor.log10 - Math.log(share), sd, factor };
 }
