@@ -102,7 +102,20 @@ function isRingHemiacetal(graph: MoleculeGraph): boolean {
   });
 }
 
+/** An sp3 carbon with two OH: a hydrate. */
+function isGemDiol(graph: MoleculeGraph): boolean {
+  return graph.atoms.some((atom) => {
+    if (atom.element !== "C" || atom.neighbours.some((bond) => bond.order !== 1)) return false;
+    const hydroxyls = atom.neighbours.filter((bond) => {
+      const other = atomAt(graph, bond.atom);
+      return other.element === "O" && other.hydrogens > 0;
+    });
+    return hydroxyls.length === 2;
+  });
+}
+
 function noSiteReason(graph: MoleculeGraph, found: string | undefined): string {
+  if (isGemDiol(graph)) return "it is written as the hydrate: write the aldehyde or ketone itself";
   if (found !== undefined) return `the C=O is that of ${found}`;
   return isRingHemiacetal(graph)
     ? "it is written as the ring form: write the open-chain aldehyde or ketone"

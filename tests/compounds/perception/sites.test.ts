@@ -68,6 +68,8 @@ describe("classes of carbonyl sites", () => {
 
   it("says what to write for a sugar in its ring form, and for two compounds in one SMILES", () => {
     expect(classes("OC1OC(CO)C(O)C(O)C1O")).toMatch(/write the open-chain/);
+    expect(classes("OC(O)C(Cl)(Cl)Cl")).toMatch(/write the aldehyde or ketone itself/);
+    expect(classes("OC(O)C(=O)O")).toMatch(/written as the hydrate/);
     expect(classes("CC=O.CC(C)=O")).toMatch(/one at a time/);
     expect(classes("[Fe+3].CC=O")).toMatch(/Fe/);
   });
