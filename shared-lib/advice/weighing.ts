@@ -4,6 +4,7 @@ import { usable, writtenQuantities } from "../flask/charge-quantities.ts";
 import { materialOf } from "../flask/charge-total.ts";
 import type { ResolvedCharge } from "../flask/types.ts";
 import type { Charge, Quantity } from "../notes/types.ts";
+import { massText, volumeText } from "./figures.ts";
 import type { AdviceContext, StepView } from "./types.ts";
 
 /** Two figures of one charge that differ by less than this are one statement (common practice, no source). */
@@ -88,6 +89,12 @@ function meantAmount(
   return counted !== undefined && equivalents
     ? { meant: counted, meantBy: "equivalents", by: equivalents, backed: false }
     : undefined;
+}
+
+/** What would have to be weighed or measured out for the amount meant, as the writer measures it. */
+export function neededText({ by, meant, holds, massG }: Weighing): string {
+  const times = meant / holds;
+  return by.of === "volume" ? volumeText(by.base * times) : massText(massG * times);
 }
 
 /** Whether two figures are one statement, within what the writer's digits allow. */

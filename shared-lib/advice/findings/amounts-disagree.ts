@@ -2,10 +2,10 @@
 
 import { writtenQuantities } from "../../flask/charge-quantities.ts";
 import type { ResolvedCharge } from "../../flask/types.ts";
-import { amountText, massText, trimmed } from "../figures.ts";
+import { amountText, trimmed } from "../figures.ts";
 import { COUNTED, scaleCharge, WEIGHED } from "../fixes/scale-charge.ts";
 import type { AdviceContext, FindingRule, RawFinding, SafeFix, StepView } from "../types.ts";
-import { agrees, countedWhole, roundingOf, type Weighing, weighedAs, weighingOf } from "../weighing.ts";
+import { agrees, countedWhole, neededText, roundingOf, type Weighing, weighedAs, weighingOf } from "../weighing.ts";
 
 /** Without a slip that explains it, figures must differ by more than lots and rounding do (common practice, no source). */
 const UNEXPLAINED = 0.2;
@@ -54,7 +54,7 @@ function lookAtWeighing(context: AdviceContext, step: StepView, charge: Resolved
   const slip = slipOf(context, charge, weighing);
   if (!slip && !speaksWithoutSlip(charge, weighing)) return [];
   const because = slip ? `; the likely slip is ${slip.says}` : "";
-  const needed = massText(weighing.meant * weighing.gramsPerMole);
+  const needed = neededText(weighing);
   const message = `${weighing.by.text} of ${charge.compound.name} is ${amountText(weighing.holds)}, not ${amountText(weighing.meant)} (which is ${needed})${because}.`;
   const fixes = slip ? fixesOf(context, weighing, needed) : [];
   return [{ start: mention.start, end: mention.end, mention: charge.mention, message, fixes }];
@@ -72,7 +72,7 @@ function speaksWithoutSlip({ compound, formIs }: ResolvedCharge, { holds, meant,
 function fixesOf(context: AdviceContext, weighing: Weighing, needed: string): readonly SafeFix[] {
   const fixes: SafeFix[] = [];
   const weighed = scaleCharge(context.text, weighing.written, WEIGHED, weighing.meant / weighing.holds);
-  if (weighed) fixes.push({ title: `Weigh ${needed}, and keep the amount`, edits: weighed, safe: false });
+  if (weighed) fixes.push({ title: `Take ${needed}, and keep the amount`, edits: weighed, safe: false });
   const counted = scaleCharge(context.text, weighing.written, COUNTED, weighing.holds / weighing.meant);
   if (counted)
     fixes.push({ title: `Keep what is weighed: it is ${amountText(weighing.holds)}`, edits: counted, safe: false });
