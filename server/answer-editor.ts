@@ -90,12 +90,13 @@ async function hover(
 ) {
   const { markdownHover, images, commandLinks } = abilities();
   const withImages = markdownHover && images;
-  const offered = hoverOf(note, params.position, { markdown: markdownHover });
+  const offered = hoverOf(note, params.position, { markdown: markdownHover, findingsElsewhere: commandLinks });
   if (!offered) return null;
   if (withImages) await engine.loadStructures();
   return (
     hoverOf(note, params.position, {
       markdown: markdownHover,
+      findingsElsewhere: commandLinks,
       ...(withImages ? { image: drawings.image } : {}),
       ...(commandLinks ? { actions: cardActions(note, params.position) } : {}),
     }) ?? null

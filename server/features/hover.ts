@@ -9,6 +9,7 @@ import { holds, rangeOf } from "../ranges.ts";
 
 export interface HoverOptions extends CardOptions {
   readonly markdown: boolean;
+  readonly findingsElsewhere: boolean;
 }
 
 /** The mention at an offset that a card can be made of: the mention itself, else the charge around it. */
@@ -22,7 +23,10 @@ export function carbonylMentionAt(note: OpenNote, offset: number): number | unde
 export function hoverOf(note: OpenNote, position: Position, options: HoverOptions): Hover | undefined {
   const index = carbonylMentionAt(note, note.document.offsetAt(position));
   const mention = index === undefined ? undefined : note.analysis.reading.mentions[index];
-  const card = index === undefined ? undefined : cardOfMention(note.analysis, index);
+  const card =
+    index === undefined
+      ? undefined
+      : cardOfMention(note.analysis, index, { findingsElsewhere: options.findingsElsewhere });
   if (!mention || !card) return undefined;
   const value = options.markdown ? cardMarkdown(card, options) : cardText(card);
   return {

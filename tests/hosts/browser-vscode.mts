@@ -2,24 +2,16 @@
 
 import { startBrowserHost } from "./browser-host.mts";
 import { createChecks, mustShow } from "./checks.mts";
-import { exampleNotes, unpackExtension } from "./extension-folder.mts";
+import { unpackExtension, workspaceNotes } from "./extension-folder.mts";
 import { clickOn, command, openNote, type Person, picture, restOn, sitDown, webviewWith } from "./person.mts";
-
-/** A line of our own, so that the figures that are seen can be compared with the literature. */
-const NOTE = `# Trial of the day
-
-Acetaldehyde (4.41 g, 100 mmol, 1.0 equiv) was added to water (500 mL) at 25 °C, and the mixture was stirred for 2 h.
-
-Chloral hydrate (14.7 g, 100 mmol, 1.0 equiv) was dissolved in water (200 mL).
-`;
 
 export async function browserHost(): Promise<number> {
   const extension = unpackExtension();
-  const files = { ...exampleNotes(), "trial.md": NOTE };
+  const files = workspaceNotes();
   const host = await startBrowserHost({
     extension,
     files,
-    settings: { "workbench.colorTheme": "Default Light Modern" },
+    settings: { "workbench.colorTheme": "Default Light Modern", "editor.hover.above": false },
   });
   const person = await sitDown(host.url);
   const { page } = person;
@@ -27,14 +19,14 @@ export async function browserHost(): Promise<number> {
   const { check } = checks;
 
   await check("a note opens and its labels appear", async () => {
-    await openNote(person, "1-oxime-in-water.md", "Acetaldehyde");
+    await openNote(person, "trial.md", "Trial of the day");
     await page
       .locator(".view-lines", { hasText: /\d+\s%\shydrate/ })
       .first()
       .waitFor();
   });
   await check("the card shows answer, range, reasons and drawings", async () => {
-    const card = await restOn(person, "Acetaldehyde", "35.2 g");
+    const card = await restOn(person, "Acetaldehyde", "4.41 g");
     await page.waitForFunction(() => document.querySelectorAll(".monaco-hover:not(.hidden) img").length >= 2);
     const text = await card.textContent();
     mustShow(text, /acetaldehyde: \d+ % /);
@@ -60,10 +52,7 @@ export async function browserHost(): Promise<number> {
   });
   await check("the folder view counts what needs attention", async () => {
     await command(person, "Check every note of the folder");
-    await page
-      .locator(".tree-explorer-viewlet-tree-view .monaco-list-row", { hasText: "1-oxime-in-water.md" })
-      .first()
-      .waitFor();
+    await page.locator(".tree-explorer-viewlet-tree-view .monaco-list-row", { hasText: "trial.md" }).first().waitFor();
     await picture(person, "light-folder");
   });
   await check("the Markdown preview shows the labels", async () => {
@@ -111,17 +100,16 @@ async function fixChanges(person: Person): Promise<void> {
 /** The card drawn out to its full height over a note that has something to say; saved as test-results/screenshot.png. */
 async function readmePicture(person: Person): Promise<void> {
   const { page } = person;
-  await openNote(person, "4-supplied-solutions.md", "Glyoxylic acid");
+  await openNote(person, "trial.md", "Trial of the day");
   await page.locator(".squiggly-warning").first().waitFor();
-  await restOn(person, "Glyoxylic acid");
-  const widget = page.locator(".monaco-resizable-hover, .resizable-content-hover, .monaco-hover:not(.hidden)").first();
-  const box = await widget.boundingBox();
-  if (!box) throw new Error("the card has no box");
-  await page.mouse.move(box.x + box.width / 2, box.y + 40, { steps: 3 });
-  await page.mouse.move(box.x + box.width / 2, box.y + box.height - 1, { steps: 10 });
-  await page.waitForTimeout(400);
+  await restOn(person, "Acetaldehyde", "4.41 g");
+  const edge = await page.locator(".monaco-sash.orthogonal-edge-south:not(.disabled)").last().boundingBox();
+  if (!edge) throw new Error("the card has no lower edge");
+  const [x, y] = [edge.x + edge.width / 2, edge.y + edge.height / 2];
+  await page.mouse.move(x, y - 40, { steps: 5 });
+  await page.mouse.move(x, y, { steps: 10 });
   await page.mouse.down();
-  await page.mouse.move(box.x + box.width / 2, Math.min(735, box.y + box.height + 300), { steps: 10 });
+  await page.mouse.move(x, 722, { steps: 10 });
   await page.mouse.up();
   await page.waitForTimeout(500);
   await picture(person, "screenshot");

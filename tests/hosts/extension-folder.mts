@@ -18,9 +18,20 @@ export function unpackExtension(): string {
   return path.join(folder, "extension");
 }
 
-/** The example notes by file name, as the workspace that the hosts open. */
-export function exampleNotes(): Record<string, string> {
+/** A note of our own, so that the figures that are seen can be compared with the literature. */
+const TRIAL = `# Trial of the day
+
+Acetaldehyde (4.41 g, 100 mmol, 1.0 equiv) was added to water (500 mL) at 25 °C, and the mixture was stirred for 2 h.
+
+## Second flask
+
+Chloral hydrate (14.7 g, 100 mmol, 1.0 equiv) was dissolved in water (200 mL) at 25 °C.
+`;
+
+/** The example notes and the trial by file name, as the workspace that the hosts open. */
+export function workspaceNotes(): Record<string, string> {
   const folder = "media/example-notes";
   const names = readdirSync(folder).filter((name) => /\.(md|txt)$/.test(name));
-  return Object.fromEntries(names.map((name) => [name, readFileSync(path.join(folder, name), "utf8")]));
+  const examples = names.map((name) => [name, readFileSync(path.join(folder, name), "utf8")] as const);
+  return { ...Object.fromEntries(examples), "trial.md": TRIAL };
 }

@@ -4,7 +4,7 @@ import { readFileSync } from "node:fs";
 import type { Frame } from "playwright-core";
 import { startBrowserHost } from "./browser-host.mts";
 import { createChecks, mustShow } from "./checks.mts";
-import { exampleNotes, unpackExtension } from "./extension-folder.mts";
+import { unpackExtension, workspaceNotes } from "./extension-folder.mts";
 import { clickOn, command, openNote, type Person, picture, sitDown, webviewWith } from "./person.mts";
 
 const AXE = readFileSync("node_modules/axe-core/axe.min.js", "utf8");
@@ -12,7 +12,7 @@ const AXE = readFileSync("node_modules/axe-core/axe.min.js", "utf8");
 export async function panelHost(): Promise<number> {
   const host = await startBrowserHost({
     extension: unpackExtension(),
-    files: exampleNotes(),
+    files: workspaceNotes(),
     settings: { "workbench.colorTheme": "Default Light Modern" },
   });
   const person = await sitDown(host.url, { width: 1500, height: 950 });
@@ -20,8 +20,8 @@ export async function panelHost(): Promise<number> {
   let frame: Frame | undefined;
 
   await checks.check("the panel opens on the charge at the cursor", async () => {
-    await openNote(person, "1-oxime-in-water.md", "Acetaldehyde");
-    await clickOn(person, "Acetaldehyde", "35.2 g");
+    await openNote(person, "trial.md", "Trial of the day");
+    await clickOn(person, "Acetaldehyde", "4.41 g");
     await command(person, "Plot the forms in this flask");
     frame = await webviewWith(person, "#plot canvas");
     await frame.locator(".key li", { hasText: "hydrate" }).first().waitFor();

@@ -53,12 +53,23 @@ export async function sitDown(url: string, size = { width: 1200, height: 750 }):
   };
 }
 
+/** Opens a note by name; asks again while the workspace is still loading. */
 export async function openNote({ page }: Person, name: string, words: string): Promise<void> {
-  await page.keyboard.press("Control+P");
-  const box = page.locator(".quick-input-widget input.input");
-  await box.waitFor();
-  await box.fill(name);
-  await page.locator(".quick-input-list .monaco-list-row", { hasText: name }).first().click();
+  const row = page.locator(".quick-input-list .monaco-list-row", { hasText: name }).first();
+  const end = Date.now() + 3 * PATIENCE;
+  for (;;) {
+    await page.keyboard.press("Control+P");
+    const box = page.locator(".quick-input-widget input.input");
+    await box.waitFor();
+    await box.fill(name);
+    const found = await row.click({ timeout: 4_000 }).then(
+      () => true,
+      () => false,
+    );
+    if (found) break;
+    await page.keyboard.press("Escape");
+    if (Date.now() > end) throw new Error(`the workspace does not show ${name}`);
+  }
   await page.locator(".view-lines", { hasText: words }).first().waitFor();
 }
 

@@ -2,7 +2,7 @@
 
 import { startBrowserHost } from "./browser-host.mts";
 import { createChecks } from "./checks.mts";
-import { exampleNotes, unpackExtension } from "./extension-folder.mts";
+import { unpackExtension, workspaceNotes } from "./extension-folder.mts";
 import { clickOn, command, openNote, picture, restOn, sitDown, webviewWith } from "./person.mts";
 
 const THEMES: Readonly<Record<string, { readonly name: string; readonly ink: RegExp }>> = {
@@ -18,13 +18,13 @@ export async function themesHost(): Promise<number> {
     await checks.check(`card and panel in ${theme}`, async () => {
       const host = await startBrowserHost({
         extension,
-        files: exampleNotes(),
+        files: workspaceNotes(),
         settings: { "workbench.colorTheme": name },
       });
       const person = await sitDown(host.url, { width: 1400, height: 850 });
       try {
-        await openNote(person, "1-oxime-in-water.md", "Acetaldehyde");
-        await restOn(person, "Acetaldehyde", "35.2 g");
+        await openNote(person, "trial.md", "Trial of the day");
+        await restOn(person, "Acetaldehyde", "4.41 g");
         const image = person.page.locator(".monaco-hover:not(.hidden) img").first();
         await image.waitFor({ state: "attached" });
         const address = (await image.getAttribute("src")) ?? "";
@@ -32,7 +32,7 @@ export async function themesHost(): Promise<number> {
         if (!ink.test(svg)) throw new Error(`the drawing is not in the theme's ink: ${svg.slice(0, 300)}`);
         await picture(person, `${theme}-card`);
         await person.page.keyboard.press("Escape");
-        await clickOn(person, "Acetaldehyde", "35.2 g");
+        await clickOn(person, "Acetaldehyde", "4.41 g");
         await command(person, "Plot the forms in this flask");
         await webviewWith(person, "#plot canvas");
         await person.page.waitForTimeout(700);

@@ -21,6 +21,11 @@ export interface Card {
   readonly cautions: readonly string[];
 }
 
+export interface CardContent {
+  /** The reader shows the findings of the place beside the card: then the card does not say them again. */
+  readonly findingsElsewhere?: boolean;
+}
+
 const MOST_REASONS = 3;
 const MOST_MEANINGS = 2;
 
@@ -40,14 +45,15 @@ export function formsAt(moment: SpeciatedMoment, mention: number): CarbonylForms
 }
 
 /** The card of a mention, or undefined where there is nothing to say (no carbonyl, no vessel that holds it). */
-export function cardOfMention(analysis: Analysis, mention: number): Card | undefined {
+export function cardOfMention(analysis: Analysis, mention: number, options: CardContent = {}): Card | undefined {
   const named = analysis.reading.mentions[mention];
   const index = momentOf(analysis, mention);
   const moment = index === undefined ? undefined : analysis.moments[index];
   const found = moment && formsAt(moment, mention);
   if (!named || !moment || !found) return undefined;
   const charge = analysis.charges.find((candidate) => candidate.mention === mention);
-  const meaning = analysis.findings.filter((finding) => finding.mention === mention).map((finding) => finding.message);
+  const findings = options.findingsElsewhere ? [] : analysis.findings.filter((finding) => finding.mention === mention);
+  const meaning = findings.map((finding) => finding.message);
   const time = found.time ? [timeSentence(found.time.halfLife, moment.heldSeconds)] : [];
   return {
     name: named.name || named.text,
