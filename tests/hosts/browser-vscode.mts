@@ -52,7 +52,9 @@ export async function browserHost(): Promise<number> {
   });
   await check("the folder view counts what needs attention", async () => {
     await command(person, "Check every note of the folder");
-    await page.locator(".tree-explorer-viewlet-tree-view .monaco-list-row", { hasText: "trial.md" }).first().waitFor();
+    const view = page.locator(".pane", { hasText: /findings in \d+ of \d+ notes/ }).first();
+    await view.waitFor();
+    await view.locator(".monaco-list-row").first().waitFor();
     await picture(person, "light-folder");
   });
   await check("the Markdown preview shows the labels", async () => {
@@ -101,7 +103,6 @@ async function fixChanges(person: Person): Promise<void> {
 async function readmePicture(person: Person): Promise<void> {
   const { page } = person;
   await openNote(person, "trial.md", "Trial of the day");
-  await page.locator(".squiggly-warning").first().waitFor();
   await restOn(person, "Acetaldehyde", "4.41 g");
   const edge = await page.locator(".monaco-sash.orthogonal-edge-south:not(.disabled)").last().boundingBox();
   if (!edge) throw new Error("the card has no lower edge");

@@ -60,9 +60,8 @@ export async function openNote({ page }: Person, name: string, words: string): P
   for (;;) {
     await page.keyboard.press("Control+P");
     const box = page.locator(".quick-input-widget input.input");
-    await box.waitFor();
-    await box.fill(name);
-    const found = await row.click({ timeout: 4_000 }).then(
+    const asked = box.fill(name, { timeout: 4_000 }).then(() => row.click({ timeout: 4_000 }));
+    const found = await asked.then(
       () => true,
       () => false,
     );
