@@ -30,7 +30,7 @@ export function additionConversion(constant: number, a: number, b: number): numb
 const OF_PARTNERS: ReadonlySet<FormKind> = new Set<FormKind>(["iminium or imine", "other"]);
 
 /** Share of what the partners have not taken. */
-export function ownShare({ forms }: CarbonylView): number {
+function ownShare({ forms }: CarbonylView): number {
   const taken = forms.forms.reduce((sum, form) => (OF_PARTNERS.has(form.kind) ? sum + form.fraction.value : sum), 0);
   return Math.max(1e-9, 1 - taken);
 }

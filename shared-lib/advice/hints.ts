@@ -4,7 +4,7 @@ import type { FormKind } from "../model/contract.ts";
 import { percent } from "./figures.ts";
 import type { AdviceContext, CarbonylView, Hint } from "./types.ts";
 
-export const LONGEST_LABEL = 24;
+const LONGEST_LABEL = 24;
 /** A bound share above this changes a charge by more than weighing does (common practice, no source). */
 const NOTABLE_SHARE = 0.1;
 

@@ -8,9 +8,9 @@ import { massText, volumeText } from "./figures.ts";
 import type { AdviceContext, StepView } from "./types.ts";
 
 /** Two figures of one charge that differ by less than this are one statement (common practice, no source). */
-export const TOLERANCE = 0.05;
+const TOLERANCE = 0.05;
 /** A lot's own assay may differ this much from the table's without a word (common practice, no source). */
-export const ASSAY_TOLERANCE = 0.1;
+const ASSAY_TOLERANCE = 0.1;
 
 /** What was weighed, what that holds, and what the writer meant by it. */
 export interface Weighing {

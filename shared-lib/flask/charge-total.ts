@@ -33,7 +33,7 @@ const DENSITY_SPREAD = 0.02;
 /** "ca. 5 g": within a tenth (common practice, no source). */
 const ABOUT_SPREAD = 0.1;
 /** Amount and mass that agree this well are one statement with rounding in it. */
-export const AGREEING = 0.05;
+const AGREEING = 0.05;
 
 /** Material of a charge: the written assay, density and molarity win over those of the supplied form. */
 export function materialOf(compound: Compound, form: SuppliedForm | undefined, written: WrittenQuantities): Material {
@@ -91,7 +91,7 @@ function fromWeighing(written: WrittenQuantities, material: Material): TotalOfCh
 }
 
 /** Four digits that a person can read. */
-export function figure(value: number): string {
+function figure(value: number): string {
   return String(Number(value.toPrecision(4)));
 }
 

@@ -2,7 +2,9 @@
 
 import type { ReagentTag } from "../../compounds/tags.ts";
 import { bufferByKey } from "../../media/buffers.ts";
+import { percentWithBounds } from "../figures.ts";
 import type { CarbonylView, FindingRule, RawFinding } from "../types.ts";
+import { shareOf } from "./mostly-bound.ts";
 
 const MAKES: Readonly<Partial<Record<ReagentTag, string>>> = {
   bisulfite: "the hydroxysulfonate",
@@ -26,6 +28,12 @@ const PURPOSE: Readonly<Record<string, readonly ReagentTag[]>> = {
 /** Partners that show what the step is for; beside them a second nucleophile is not the purpose. */
 const PARTNERS: readonly ReagentTag[] = ["hydroxylamine", "hydrazine", "carbon acid", "protein", "phosphonate"];
 
+/** "81 % (60 to 92) of ", as far as the equilibrium knows it. */
+function howMuch(view: CarbonylView): string {
+  const bound = shareOf(view, ["other", "iminium or imine"]);
+  return bound.value < 0.01 ? "" : `${percentWithBounds(bound)} of `;
+}
+
 function lookAt(view: CarbonylView): readonly RawFinding[] {
   const { kind } = view.step.decision;
   const { mention, charge } = view;
@@ -33,7 +41,7 @@ function lookAt(view: CarbonylView): readonly RawFinding[] {
   const key = view.moment.contents.buffer?.buffer;
   const buffer = key ? bufferByKey(key) : undefined;
   if (buffer?.reacts === "yes" && kind?.id !== "imine") {
-    const message = `The buffer ${buffer.key} binds ${charge.compound.name} itself; a buffer without an amine (phosphate, acetate) leaves it alone.`;
+    const message = `The buffer ${buffer.key} binds ${howMuch(view)}${charge.compound.name} itself; a buffer without an amine (phosphate, acetate) leaves it alone.`;
     return [{ ...place, message }];
   }
   const tags = new Set(view.step.charges.flatMap((row) => row.compound.tags));
@@ -44,7 +52,7 @@ function lookAt(view: CarbonylView): readonly RawFinding[] {
     return [
       {
         ...place,
-        message: `${compound.name} makes ${MAKES[tag]} of ${charge.compound.name} beside ${kind.title.toLowerCase()}.`,
+        message: `${compound.name} makes ${MAKES[tag]} of ${howMuch(view)}${charge.compound.name} beside ${kind.title.toLowerCase()}.`,
       },
     ];
   }

@@ -9,6 +9,8 @@ import type { AdviceContext, CarbonylView, SafeFix } from "../types.ts";
 
 /** More than this many times the charge is no correction any more. */
 const MOST_TIMES = 3;
+/** And from here on it is absurd. */
+const ABSURD_TIMES = 10;
 /** Below this free share the rate falls so far that the time of a step has to follow. */
 const SLOW_SHARE = 0.1;
 
@@ -104,9 +106,14 @@ function remedy(view: CarbonylView): string {
   return "use less water or alcohol, or let the partner take the water away";
 }
 
-/** Said instead of a larger charge that would be absurd. */
+/** Said instead of a larger charge that would be too large, or absurd. */
 export function insteadOfRaising(view: CarbonylView, mayRaise: boolean): string {
   const times = 1 / ownFree(view);
   if (!mayRaise || times <= MOST_TIMES) return "";
-  return ` A larger charge does not help (${times > 1000 ? "over 1000" : trimmed(times, 2)} times as much): ${remedy(view)}.`;
+  const larger = `${times > 1000 ? "over 1000" : trimmed(times, 2)} times as much`;
+  const says =
+    times <= ABSURD_TIMES
+      ? `To keep the free amount would take ${larger}`
+      : `A larger charge does not help (${larger})`;
+  return ` ${says}: ${remedy(view)}.`;
 }

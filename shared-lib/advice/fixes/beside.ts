@@ -15,7 +15,7 @@ export interface WrittenBeside extends Span {
 }
 
 /** Where something is written beside a charge: behind its closing bracket; in a table, inside the cell of its name. */
-export function placeBeside(text: string, view: Pick<CarbonylView, "written" | "mention">): number {
+function placeBeside(text: string, view: Pick<CarbonylView, "written" | "mention">): number {
   const { span } = view.written;
   const lineStart = text.lastIndexOf("\n", span.start - 1) + 1;
   if (text.slice(lineStart, span.start).trimStart().startsWith("|")) return view.mention.end;

@@ -32,7 +32,7 @@ export interface StepFacts {
  * How far an equilibrium step goes in water: log10 K (L/mol, free carbonyl) = atUnitHydration + slope · log10 K_h.
  * Additions to C=O run parallel to hydration (slope about 1), condensations to C=N less so.
  */
-export interface StepConstant {
+interface StepConstant {
   /** For a compound with K_h = 1, over usual partners. */
   readonly atUnitHydration: Interval;
   readonly slope: number;
