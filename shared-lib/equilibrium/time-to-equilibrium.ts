@@ -7,14 +7,25 @@
 
 import type { CarbonylSite } from "../compounds/perception/types.ts";
 import type { Compound } from "../compounds/types.ts";
+import { rateOf } from "../constants/rates.ts";
 import { bufferByKey } from "../media/buffers.ts";
 import type { Interval } from "../model/contract.ts";
 import type { Contents } from "./types.ts";
 
-const ACETALDEHYDE = { water: 6.5e-3, acid: 930, base: 6e4 };
+/** A rate constant of the table at 25 °C; `parent` as the structure toolkit writes it. */
+function tabled(parent: string, reaction: string, catalyst: string): number {
+  return rateOf(parent, reaction, catalyst)?.k ?? 0;
+}
+
+const ACETALDEHYDE = {
+  water: tabled("CC=O", "hydration", "water"),
+  acid: tabled("CC=O", "hydration", "H+"),
+  base: tabled("CC=O", "hydration", "OH-"),
+};
 const ACETALDEHYDE_LOG_K = 0.08;
-const METHANEDIOL = { acid: 2.7, base: 1.6e3 };
-const PYRUVIC = { water: 2e-2, acid: 5.6, base: 6e4 };
+const METHANEDIOL = { acid: tabled("C=O", "dehydration", "H+"), base: tabled("C=O", "dehydration", "OH-") };
+/** Its water and OH⁻ terms are judgements: of the size of acetaldehyde's. */
+const PYRUVIC = { water: 2e-2, acid: tabled("CC(C(O)=O)=O", "hydration", "H+"), base: ACETALDEHYDE.base };
 /** Rates rise with the equilibrium constant, by about half of it on a log scale (slope of rate–equilibrium relations near 0.5). */
 const EQUILIBRIUM_SLOPE = 0.5;
 /** kJ/mol, for all but formaldehyde's water term. */

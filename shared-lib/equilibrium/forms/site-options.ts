@@ -103,17 +103,19 @@ function hydrates(
   ];
 }
 
+/** @param unmeasured do not read measured hemiacetal constants: they are those of the uncharged molecule */
 function hemiacetals(
   site: CarbonylSite,
   key: string,
   hydration: ConstantEstimate,
   before: SiteOption,
   conditions: Conditions,
+  unmeasured: boolean,
 ) {
   const options: SiteOption[] = [];
   const alcohols: { name: string; constant: ConstantEstimate }[] = [];
   for (const alcohol of conditions.alcohols) {
-    const constant = hemiacetalConstant(site, hydration, alcohol, conditions.temperatureK);
+    const constant = hemiacetalConstant(site, hydration, alcohol, conditions.temperatureK, unmeasured);
     if (!constant) continue;
     alcohols.push({ name: alcohol, constant });
     // The hydration constant's error is shared with the hydrate; what the alcohol adds is its own.
@@ -181,14 +183,14 @@ export function siteOptions(compound: Compound, site: CarbonylSite, conditions: 
   // Sites that are alike share their constant, and so its error.
   const key = String((compound.carbonyl?.sites.find((other) => alike(other, site)) ?? site).atom);
   const options: SiteOption[] = [OPEN, ...hydrates(site, key, hydration, OPEN, conditions)];
-  const ethers = hemiacetals(site, key, hydration, OPEN, conditions);
+  const ethers = hemiacetals(site, key, hydration, OPEN, conditions, conditions.correlationOnly);
   options.push(...ethers.options);
   const lines: DerivationLine[] = [];
   const charged = chargedReference(compound, site, hydration, conditions);
   if (charged) {
     const written = inState(site, charged.state);
     const own = `${key} ${charged.state}`;
-    const more = hemiacetals(written, own, charged.hydration, charged.option, conditions);
+    const more = hemiacetals(written, own, charged.hydration, charged.option, conditions, true);
     options.push(charged.option, ...hydrates(written, own, charged.hydration, charged.option, conditions));
     options.push(...more.options);
     const shown = (constant: ConstantEstimate): string => constant.log10.toFixed(2).replace("-", "−");

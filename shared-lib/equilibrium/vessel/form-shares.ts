@@ -13,7 +13,9 @@ import type { VesselEquilibrium } from "./equilibrium.ts";
 /** Two-sided 95 % point of the normal distribution. */
 export const Z95 = 1.959964;
 /** Forms below this share are left out of the list. */
-const NOTHING = 1e-12;
+const NOTHING = 1e-7;
+/** Rest over share below which the rest's own terms are added one by one. */
+const SMALL = 1e-3;
 
 type Solved = VesselEquilibrium & { readonly species: readonly Species[] };
 
@@ -89,16 +91,21 @@ function logistic(x: number): number {
   return x >= 0 ? 1 / (1 + Math.exp(-x)) : Math.exp(x) / (1 + Math.exp(x));
 }
 
-function bounded(one: Gathered, all: readonly Gathered[], total: number): Interval {
+function bounded(one: Gathered, all: readonly Gathered[], total: number, sums: Float64Array): Interval {
   const value = one.value / total;
   let rest = 0;
   for (const other of all) if (other !== one) rest += other.value;
   if (!(rest > 0) || !(one.value > 0)) return { value, low: value, high: value };
   let variance = 0;
   for (let k = 0; k < one.moves.length; k++) {
-    let moved = 0;
-    for (const other of all) if (other !== one) moved += other.moves[k] as number;
-    variance += ((one.moves[k] as number) / one.value - moved / rest) ** 2;
+    // Where nearly all is in this form, the difference of the sums would lose the digits of the rest.
+    let moved = (sums[k] as number) - (one.moves[k] as number);
+    if (rest < SMALL * one.value) {
+      moved = 0;
+      for (const other of all) if (other !== one) moved += other.moves[k] as number;
+    }
+    const effect = (one.moves[k] as number) / one.value - moved / rest;
+    variance += effect * effect;
   }
   const logit = Math.log(one.value / rest);
   const half = Z95 * Math.sqrt(variance);
@@ -130,15 +137,23 @@ export function formShares(solved: Solved, sets: readonly number[], moves: reado
           into = { form, value: 0, moves: new Float64Array(moves.length) };
           gathered.set(label, into);
         }
-        into.value += weight * share;
+        const counted = weight * share;
+        into.value += counted;
         for (let k = 0; k < moves.length; k++)
-          into.moves[k] = (into.moves[k] as number) + weight * share * ((moves[k] as Float64Array)[s] as number);
+          into.moves[k] = (into.moves[k] as number) + counted * ((moves[k] as Float64Array)[s] as number);
       }
     }
   }
-  const all = [...gathered.values()].filter((one) => one.value > NOTHING || one.form.kind === "free carbonyl");
-  const total = all.reduce((sum, one) => sum + one.value, 0);
-  return all
-    .sort((a, b) => Number(b.form.kind === "free carbonyl") - Number(a.form.kind === "free carbonyl"))
-    .map((one) => ({ ...one.form, fraction: bounded(one, all, total) }));
+  const all: Gathered[] = [];
+  const sums = new Float64Array(moves.length);
+  let total = 0;
+  for (const one of gathered.values()) {
+    const free = one.form.kind === "free carbonyl";
+    if (!free && one.value <= NOTHING) continue;
+    if (free) all.unshift(one);
+    else all.push(one);
+    total += one.value;
+    for (let k = 0; k < sums.length; k++) sums[k] = (sums[k] as number) + (one.moves[k] as number);
+  }
+  return all.map((one) => ({ ...one.form, fraction: bounded(one, all, total, sums) }));
 }
