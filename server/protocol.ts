@@ -40,8 +40,6 @@ export const METHODS = {
   state: "oxomargin/state",
   /** Notification, client to server. */
   theme: "oxomargin/theme",
-  /** Notification, client to server: text of the laboratory's reagents file, or null when it is gone. */
-  reagents: "oxomargin/reagents",
 } as const;
 
 export interface EstimateRequest {

@@ -12,7 +12,6 @@ import { FolderView } from "./folder-view.ts";
 import { registerPages } from "./pages.ts";
 import { registerPanel } from "./panel/panel.ts";
 import { createPreview } from "./preview/preview.ts";
-import { watchReagents } from "./reagents-file.ts";
 import type { Server } from "./server.ts";
 import { themeNow } from "./start-options.ts";
 import { registerStatus } from "./status.ts";
@@ -43,7 +42,6 @@ export function activateWith(context: vscode.ExtensionContext, create: () => Bas
     ...registerExamples(context),
     ...registerPanel(context, server),
     preview,
-    watchReagents(server),
   );
   return { extendMarkdownIt: preview.extendMarkdownIt, ready };
 }

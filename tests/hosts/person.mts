@@ -117,7 +117,7 @@ export async function placeOf({ page }: Person, words: string, line?: string): P
 
 /** Rests the pointer on words and gives the card; tries again while the server is still starting. */
 export async function restOn(person: Person, words: string, line?: string): Promise<Locator> {
-  const card = person.page.locator(".monaco-hover:not(.hidden) .monaco-hover-content").first();
+  const card = person.page.locator(".monaco-hover:not(.hidden)").first();
   const end = Date.now() + PATIENCE;
   for (;;) {
     const { x, y } = await placeOf(person, words, line);

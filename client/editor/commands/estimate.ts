@@ -9,18 +9,32 @@ const MEMORY = "oxomargin.lastEstimate";
 
 type Field = keyof EstimateRequest;
 
-/** The questions in their order; each may be left as it stands. */
-const QUESTIONS: readonly {
+interface Question {
   readonly field: Field;
   readonly title: string;
   readonly prompt: string;
   readonly usual: string;
-}[] = [
-  { field: "what", title: "Compound", prompt: "SMILES, name or CAS number", usual: "" },
-  { field: "medium", title: "Medium", prompt: "As written in a note: water, MeOH, 9:1 MeOH/H2O, PBS", usual: "water" },
-  { field: "temperature", title: "Temperature", prompt: "Degrees Celsius", usual: "25" },
-  { field: "pH", title: "pH", prompt: "Leave empty for neutral", usual: "" },
-];
+}
+
+/** The questions in their order; each may be left as it stands. */
+function questions(): readonly Question[] {
+  return [
+    { field: "what", title: vscode.l10n.t("Compound"), prompt: vscode.l10n.t("SMILES, name or CAS number"), usual: "" },
+    {
+      field: "medium",
+      title: vscode.l10n.t("Medium"),
+      prompt: vscode.l10n.t("As written in a note: water, MeOH, 9:1 MeOH/H2O, PBS"),
+      usual: "water",
+    },
+    {
+      field: "temperature",
+      title: vscode.l10n.t("Temperature"),
+      prompt: vscode.l10n.t("Degrees Celsius"),
+      usual: "25",
+    },
+    { field: "pH", title: "pH", prompt: vscode.l10n.t("Leave empty for neutral"), usual: "" },
+  ];
+}
 
 export function registerEstimate(context: vscode.ExtensionContext, server: Server): vscode.Disposable[] {
   const ask = async (): Promise<void> => {
@@ -48,10 +62,11 @@ function pathSafe(what: string): string {
 /** Asks each field in turn; Escape ends it. An answer that the server cannot read is said below the box at once. */
 async function answers(server: Server, start: Partial<EstimateRequest>): Promise<EstimateRequest | undefined> {
   let request: EstimateRequest = { what: "", ...start };
-  for (const [index, { field, title, prompt, usual }] of QUESTIONS.entries()) {
+  const asked = questions();
+  for (const [index, { field, title, prompt, usual }] of asked.entries()) {
     const answer = await vscode.window.showInputBox({
-      title: `${vscode.l10n.t(title)} (${index + 1}/${QUESTIONS.length})`,
-      prompt: vscode.l10n.t(prompt),
+      title: `${title} (${index + 1}/${asked.length})`,
+      prompt,
       value: request[field] ?? usual,
       validateInput: (text) => problemWith(server, { ...request, [field]: text }, field),
     });
