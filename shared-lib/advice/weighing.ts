@@ -80,8 +80,8 @@ function meantAmount(
     }
   | undefined {
   const one = step.equivalent;
-  const counted =
-    one?.by === "written" && one.charge !== charge.charge && equivalents ? equivalents.base * one.mol : undefined;
+  const sure = one?.by === "written" && (one.charge !== charge.charge || one.agreeing > 1);
+  const counted = sure && equivalents ? equivalents.base * one.mol : undefined;
   if (amount) {
     const backed = counted !== undefined && Math.abs(counted / amount.base - 1) <= TOLERANCE;
     return { meant: amount.base, meantBy: "amount", by: amount, backed };

@@ -13,6 +13,8 @@ export interface EquivalentOfStep {
   readonly charge: number;
   /** The writer's own equivalents say so, or it is the smallest reagent. */
   readonly by: "written" | "smallest";
+  /** Number of charges whose amount and equivalents say the same. */
+  readonly agreeing: number;
 }
 
 /** Equivalents, and the amount in mol where one is written, of a charge. */
@@ -56,7 +58,7 @@ export function equivalentOfStep(
     const agreeing = counted.filter((other) => Math.abs(other.mol / mol - 1) <= AGREEING).length;
     const weight = agreeing + sure;
     if (weight <= most) continue;
-    best = { mol, charge, by: "written" };
+    best = { mol, charge, by: "written", agreeing };
     most = weight;
   }
   return best ?? smallestReagent(charges);
@@ -66,7 +68,7 @@ function smallestReagent(charges: readonly ResolvedCharge[]): EquivalentOfStep |
   let smallest: EquivalentOfStep | undefined;
   for (const { charge, total, compound } of charges) {
     if (!total || compound.solvent !== undefined || compound.tags.some((tag) => HELPERS.has(tag))) continue;
-    if (!smallest || total.value < smallest.mol) smallest = { mol: total.value, charge, by: "smallest" };
+    if (!smallest || total.value < smallest.mol) smallest = { mol: total.value, charge, by: "smallest", agreeing: 0 };
   }
   return smallest;
 }
