@@ -80,7 +80,7 @@ function timed(command: string, args: readonly string[], cwd?: string): number {
 }
 
 function coldStart(): Line {
-  const note = path.resolve("media/example-notes/1-oxime-in-water.md");
+  const note = path.resolve("media/example-notes/1-dilute-in-water.md");
   const [bare = 0, check = 0] = inTurns(
     9,
     () => void timed(process.execPath, ["-e", "0"]),

@@ -1,9 +1,9 @@
 /** The report as one printable page: no script, nothing from a network, figures as inline SVG; every text is escaped. */
 
 import { amountText, percentWithBounds } from "../advice/figures.ts";
+import { ledgerCells, ledgerHeadings, linesBelow } from "../advice/ledger/write.ts";
 import { barOf, hatchings, patchOf } from "./bar.ts";
 import { escapeHtml } from "./escape-html.ts";
-import { ledgerTable } from "./ledger-table.ts";
 import { chargeInWords, kindInWords, placesOf, stepName } from "./rows.ts";
 import type { CarbonylReport, NoteOnFile, StepReport } from "./types.ts";
 import type { ReportWriter } from "./writer.ts";
@@ -51,14 +51,14 @@ function stepAsHtml(note: NoteOnFile, step: StepReport, lineOf: (offset: number)
     ["line", "reagent", "charged", "supplied form", "in the flask"],
     rows,
   );
-  const ledger = ledgerTable(step.ledger);
-  const ledgerRows = ledger.rows.map((row) => `<tr>${row.map(cell).join("")}</tr>`);
-  const below = ledger.below.map((line) => `<p>${escapeHtml(line)}</p>`);
+  const { ledger } = step;
+  const ledgerRows = ledger.rows.map((row) => `<tr>${ledgerCells(row).map(cell).join("")}</tr>`);
+  const below = linesBelow(ledger).map((line) => `<p>${escapeHtml(line)}</p>`);
   const kind = kindInWords(step);
   return [
     `<h3>${escapeHtml(stepName(step))}</h3><p>${escapeHtml(`${kind.charAt(0).toUpperCase()}${kind.slice(1)}.`)}</p>`,
     forms,
-    ledger.rows.length > 0 ? table("Ledger", ledger.headings, ledgerRows) + below.join("") : "",
+    ledger.rows.length > 0 ? table("Ledger", ledgerHeadings, ledgerRows) + below.join("") : "",
     `<h4>How the figures were reached</h4>${step.carbonyls.map((carbonyl) => methodOf(note, carbonyl)).join("")}`,
   ].join("\n");
 }

@@ -23,7 +23,7 @@ describe("check --format json", () => {
   });
 
   it("carries the steps with their kinds and ledgers beside the contract's fields", async () => {
-    const { out } = await oxomargin(["check", `${EXAMPLES}/1-oxime-in-water.md`, "--format", "json"]);
+    const { out } = await oxomargin(["check", `${EXAMPLES}/1-dilute-in-water.md`, "--format", "json"]);
     const [file] = JSON.parse(out).files as [{ steps: { kind?: { id: string }; ledger: { rows: unknown[] } }[] }];
     expect(file.steps.some((step) => step.kind?.id === "oxime" && step.ledger.rows.length >= 2)).toBe(true);
   });
