@@ -29,7 +29,7 @@ PATH is a note (.md, .markdown, .txt) or a folder, which is walked; .gitignore a
   --format F       ${REPORT_FORMATS.join(", ")} (text)
                    ndjson: one note a line; csv: the ledgers for a spreadsheet; html, markdown: one page to file
   --fail-on S      never, hint, note or warning: exit status 1 when a finding is at least that (never)
-  --jobs N         threads, 1 to 64 (as many as the machine runs at once, from 100 notes on)
+  --jobs N         threads, 1 to 64 (as many as the machine runs at once, from 400 notes on)
   --cache FOLDER   keep results there and use them while nothing changed; the folder may be deleted at any time
   --stdin          read one note from standard input; the ending of --name says its format
   --records        read NDJSON {"id": …, "text": …} from standard input and answer each line with one line, in order;
