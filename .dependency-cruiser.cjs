@@ -65,6 +65,10 @@ module.exports = {
     doNotFollow: { path: "node_modules" },
     tsConfig: { fileName: "tsconfig.json" },
     tsPreCompilationDeps: true,
-    enhancedResolveOptions: { extensions: [".ts", ".mts", ".js", ".mjs", ".json"] },
+    enhancedResolveOptions: {
+      exportsFields: ["exports"],
+      conditionNames: ["import", "require", "node", "browser", "default"],
+      extensions: [".ts", ".mts", ".js", ".mjs", ".json"],
+    },
   },
 };

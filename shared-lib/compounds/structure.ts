@@ -73,7 +73,10 @@ function chemicalFault(
 
 function firstMessage(error: unknown): string {
   const text = error instanceof Error ? error.message : String(error);
-  return text.replace(/^[^ ]*\$[^ ]* /, "").replace(/^SmilesParser: /, "");
+  // Thrown values print as "Class$S19: SmilesParser: …": what follows the last of these words is for the reader.
+  const word = "SmilesParser: ";
+  const at = text.indexOf(word);
+  return at < 0 ? text : text.slice(at + word.length);
 }
 
 function parse(smiles: string): { molecule: Molecule } | { problem: string; at?: number } {

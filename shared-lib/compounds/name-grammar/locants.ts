@@ -65,16 +65,44 @@ export function multipliersAt(text: string, at: number): readonly { readonly cou
   return [...found, { count: 1, end: at }];
 }
 
-/** What says nothing of the constitution: "(e)-", "(1r,5s)-", "trans-", "(±)-", "1h-". */
-const SILENT =
-  /^(?:\((?:[0-9a-g]{0,3}[rsez](?:,[0-9a-g]{0,3}[rsez*]{1,2})*|rs|sr|\+|-|\+\/-|±|\+-|d|l|dl|[rs]\*|e\/z|racemic|cis|trans)\)-?|(?:trans|cis|rac|dl|d|l|meso|exo|endo|syn|anti|[ez])-|\d{1,2}h-)/;
+/** Words in a bracket that say nothing of the constitution. */
+const SILENT_BRACKETS = new Set("rs sr + - +/- ± +- d l dl r* s* e/z racemic cis trans".split(" "));
+const SILENT_WORDS = [
+  "trans-",
+  "cis-",
+  "rac-",
+  "dl-",
+  "d-",
+  "l-",
+  "meso-",
+  "exo-",
+  "endo-",
+  "syn-",
+  "anti-",
+  "e-",
+  "z-",
+];
+const INDICATED_HYDROGEN = /^\d{1,2}h-/;
+/** One descriptor: up to three characters of place, then r, s, e or z. */
+const DESCRIPTOR = /^[0-9a-g]{0,3}[rsez]\*?$/;
+const LONGEST_BRACKET = 40;
+
+/** Length of the silent part that stands at `at`: "(e)-", "(1r,5s)-", "trans-", "(±)-", "1h-"; 0 for none. */
+function silentLength(text: string, at: number): number {
+  if (text[at] === "(") {
+    const close = text.indexOf(")", at);
+    if (close < 0 || close - at > LONGEST_BRACKET) return 0;
+    const inside = text.slice(at + 1, close);
+    const silent = SILENT_BRACKETS.has(inside) || inside.split(",").every((part) => DESCRIPTOR.test(part.trim()));
+    return silent ? close + 1 - at + (text[close + 1] === "-" ? 1 : 0) : 0;
+  }
+  const word = SILENT_WORDS.find((candidate) => text.startsWith(candidate, at));
+  return word?.length ?? INDICATED_HYDROGEN.exec(text.slice(at, at + 4))?.[0].length ?? 0;
+}
 
 /** Offset behind everything silent that stands at `at`. */
 export function skipSilent(text: string, at: number): number {
   let i = at;
-  for (;;) {
-    const found = SILENT.exec(text.slice(i, i + 30));
-    if (!found || found[0].length === 0) return i;
-    i += found[0].length;
-  }
+  for (let length = silentLength(text, i); length > 0; length = silentLength(text, i)) i += length;
+  return i;
 }

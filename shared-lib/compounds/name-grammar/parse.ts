@@ -128,7 +128,7 @@ class Reader {
     }));
     for (const piece of piecesAt(grammarTables().parents, text, skipSilent(text, at))) {
       const behind = skipSilent(text, at) + piece.name.length;
-      const yl = /^(?:-(\d{1,2}[a-g]?)-?)?yl(?![a-z]*o[a-z]*ne)/.exec(text.slice(behind, behind + 10));
+      const yl = /^(?:-(\d{1,2}[a-g]?)-?)?yl/.exec(text.slice(behind, behind + 10));
       const attach = yl ? piece.locants.get(yl[1] ?? "") : undefined;
       if (yl && attach !== undefined) found.push({ group: { ...groupOf(piece), attach }, end: behind + yl[0].length });
     }
@@ -447,10 +447,10 @@ function saltOf(text: string): string | undefined {
 }
 
 function readWhole(text: string): Molecule | undefined {
-  const behind = /^(.* acid),? (.+) ester$/.exec(text);
-  if (behind) {
-    const alkyls = alkylWords((behind[2] as string).split(" "));
-    const acid = behind[1] as string;
+  const acidEnd = text.indexOf(" acid");
+  if (text.endsWith(" ester") && acidEnd > 0) {
+    const acid = text.slice(0, acidEnd + " acid".length);
+    const alkyls = alkylWords(text.slice(acid.length, -" ester".length).replace(",", "").trim().split(" "));
     return alkyls ? new Reader(alkyls).main(acid.replace(/ic acid$/, "ate")) : undefined;
   }
   const words = text.split(" ");
