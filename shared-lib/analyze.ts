@@ -4,7 +4,7 @@ import { advise } from "./advice/advise.ts";
 import type { Finding, Hint } from "./advice/types.ts";
 import type { Lexicon } from "./compounds/lexicon.ts";
 import type { StructureToolkit } from "./compounds/types.ts";
-import { speciate } from "./equilibrium/speciate.ts";
+import { rememberedSpeciation } from "./equilibrium/remembered.ts";
 import { buildTimeline } from "./flask/timeline.ts";
 import type { ResolvedCharge, SpeciatedMoment } from "./flask/types.ts";
 import { DEFAULT_SETTINGS, type Settings } from "./model/settings.ts";
@@ -37,7 +37,7 @@ export function analyze(text: string, options: AnalyzeOptions): Analysis {
   const settings = options.settings ?? DEFAULT_SETTINGS;
   const reading = readNote(text, options);
   const timeline = buildTimeline(reading, settings, options.lexicon);
-  const moments = timeline.moments.map((moment) => ({ ...moment, speciation: speciate(moment.contents) }));
+  const moments = timeline.moments.map((moment) => ({ ...moment, speciation: rememberedSpeciation(moment.contents) }));
   const advice = advise({ text, reading, timeline, moments, settings, lexicon: options.lexicon });
   return { reading, charges: timeline.charges, moments, findings: advice.findings, hints: advice.hints };
 }

@@ -1,0 +1,31 @@
+/**
+ * Speciations by what is in the vessel: an edit changes one step of a note, and the vessels of the others are what they were.
+ * Contents are plain data, so the same key always has the same answer; the memory is bounded and forgets the oldest use first.
+ */
+
+import { LRUCache } from "lru-cache";
+import type { Compound } from "../compounds/types.ts";
+import { speciate } from "./speciate.ts";
+import type { Contents, Speciation } from "./types.ts";
+
+const MOST_REMEMBERED = 4000;
+const remembered = new LRUCache<string, Speciation>({ max: MOST_REMEMBERED });
+
+/** A compound stands in the key by its identity and its structure: a lab's own reagent may bear a catalogue's name. */
+function keyOf(contents: Contents): string {
+  return JSON.stringify(contents, (name, value: unknown) => {
+    if (name !== "compound") return value;
+    const { id, smiles, origin } = value as Compound;
+    return `${origin} ${id} ${smiles}`;
+  });
+}
+
+/** As `speciate`, answered from memory for contents that were worked out before. */
+export function rememberedSpeciation(contents: Contents): Speciation {
+  const key = keyOf(contents);
+  const known = remembered.get(key);
+  if (known) return known;
+  const fresh = speciate(contents);
+  remembered.set(key, fresh);
+  return fresh;
+}
