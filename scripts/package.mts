@@ -47,7 +47,15 @@ function writeContents(): void {
 function makeAll(): void {
   run("npm", ["run", "build"]);
   writeContents();
-  run("npx", ["vsce", "package", "--no-dependencies", "--allow-missing-repository", "--out", PACKAGES.vsix]);
+  run("npx", [
+    "vsce",
+    "package",
+    "--no-dependencies",
+    "--allow-missing-repository",
+    "--no-rewrite-relative-links",
+    "--out",
+    PACKAGES.vsix,
+  ]);
   const [{ filename }] = JSON.parse(run("npm", ["pack", "--ignore-scripts", "--json"])) as [{ filename: string }];
   renameSync(filename, PACKAGES.tarball);
 }

@@ -79,7 +79,7 @@ function partsOf(item: Item & { kind: "name" }, binding: Binding | undefined, aq
         ? 0.5
         : undefined;
   if (share === undefined) return [own];
-  const basis = strength && strength.unit.startsWith("wt") ? "mass" : "volume";
+  const basis = strength?.unit.startsWith("wt") ? "mass" : "volume";
   if (volumeL !== undefined && basis === "volume")
     return [
       { ...own, volumeL: volumeL * share },

@@ -2,6 +2,7 @@
 
 import type { Lexicon } from "../compounds/lexicon.ts";
 import { bufferByKey, usualPH } from "../media/buffers.ts";
+import { stockAmounts, stockMediumNamed } from "../media/stock-media.ts";
 import { bindAmounts } from "./bind.ts";
 import { amountsOf, readMedia } from "./media.ts";
 import { scanBlock } from "./scan.ts";
@@ -16,6 +17,9 @@ export type StandaloneMedium =
 
 /** Reads a medium. @returns moles of each solvent (on one litre), or what is wrong and how to write it */
 export function readMedium(text: string, lexicon: Lexicon): StandaloneMedium {
+  const stock = stockMediumNamed(text.trim());
+  if (stock)
+    return { ok: true, amounts: stockAmounts(stock, 1000), ...(stock.pH === undefined ? {} : { pH: stock.pH }) };
   const { items } = scanBlock(text, { lexicon });
   const solvents = items.flatMap((item, i) =>
     item.kind === "name" && item.match.compound.solvent !== undefined ? [i] : [],

@@ -71,6 +71,9 @@ class Reader {
       const groupStart = count > 1 && text[end] === "-" ? end + 1 : end;
       for (const { group, end: behind } of this.groupsAt(text, groupStart, depth)) {
         if (behind >= text.length) continue;
+        // "tris(hydroxymethyl)aminomethane": bis and tris count what the bracket holds, not what follows it too.
+        const bracket = count > 1 ? closingBracket(text, groupStart) : undefined;
+        if (bracket !== undefined && behind > bracket + 1) continue;
         // "methylthiochroman": the thio is the ring's.
         if (
           text.startsWith("thio", behind - 4) &&
@@ -320,7 +323,7 @@ function placesOf(
 function isPlainRing(molecule: Molecule): boolean {
   return (
     molecule.atoms.every((atom, index) => atom.element === "C" && molecule.neighbours(index).length === 2) &&
-    (molecule.bonds.every((bond) => bond.order === 1) || molecule.bonds.filter((bond) => bond.order === 2).length === 1)
+    molecule.bonds.every((bond) => bond.order === 1)
   );
 }
 
