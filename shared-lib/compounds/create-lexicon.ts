@@ -269,11 +269,12 @@ const NOT_PART = ["water", "methanol", "ethanol", "hexane", "toluene", "chlorofo
 
 /** The name goes on into another word: "benzaldehyde oxime", "acetone-1,3-dicarboxylate", "formaldehyde-free". */
 function isMasked(text: string, end: number): boolean {
-  const after = plainText(text.slice(end, end + 18)).toLowerCase();
+  const after = plainText(text.slice(end, end + 24)).toLowerCase();
   if (after[0] === "-" && isWordCharacter(after[1])) return !NOT_PART.some((word) => after.startsWith(word, 1));
   if (after[0] !== " " && after[0] !== "-") return false;
   // "benzofuran-2,3-dione 2-[O-…]oxime": the name goes on behind the space.
   if (/^ \d{1,2}'?-[[(]/.test(after)) return true;
+  if (/^ (?:sodium|potassium) bisul/.test(after)) return true;
   let i = end + 1;
   while (i < text.length && isLetter(text[i])) i++;
   return MASKING.has(text.slice(end + 1, i).toLowerCase());

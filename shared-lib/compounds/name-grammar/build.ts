@@ -56,6 +56,13 @@ export function saturate(molecule: Molecule, atoms: readonly number[]): boolean 
   }
   // A double bond between two saturated atoms is gone.
   for (const bond of molecule.bonds) if (left.has(bond.a) && left.has(bond.b) && bond.order === 2) bond.order = 1;
+  // One end of a double bond cannot be hydrogenated alone: the name means another ring.
+  if (
+    molecule.bonds.some(
+      (bond) => bond.order === 2 && left.has(bond.a) !== left.has(bond.b) && bothCarbon(molecule, bond.a, bond.b),
+    )
+  )
+    return false;
   // Aromatic atoms whose ring was opened by this keep one double bond with a neighbour in the same state.
   const rings = aromaticRings(molecule);
   const whole = new Set(rings.flat());
@@ -80,6 +87,10 @@ export function saturate(molecule: Molecule, atoms: readonly number[]): boolean 
     open.delete(partner.atom);
   }
   return true;
+}
+
+function bothCarbon(molecule: Molecule, a: number, b: number): boolean {
+  return molecule.atoms[a]?.element === "C" && molecule.atoms[b]?.element === "C";
 }
 
 /** Five- and six-membered rings whose atoms are all marked aromatic. */

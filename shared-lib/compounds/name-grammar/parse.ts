@@ -14,6 +14,13 @@ export const LONGEST_NAME = 200;
 const MOST_STEPS = 6000;
 const DEEPEST_BRACKET = 6;
 
+/** Groups that join two others and end nothing: "4-carbonylbenzaldehyde" is no name. */
+const LINKERS = new Set(
+  "thio sulfinyl sulphinyl sulfonyl sulphonyl oxy carbonyl carbonylamino carbonyloxy sulfonylamino sulfonamido amido".split(
+    " ",
+  ),
+);
+
 interface Placed {
   readonly locants?: readonly string[];
   readonly count: number;
@@ -125,7 +132,8 @@ class Reader {
   }
 
   #plainGroupsAt(text: string, at: number, depth: number): { group: Group; end: number }[] {
-    const found = piecesAt(grammarTables().groups, text, at).map((piece) => ({
+    const whole = piecesAt(grammarTables().groups, text, at).filter((piece) => !LINKERS.has(piece.name));
+    const found = whole.map((piece) => ({
       group: groupOf(piece),
       end: at + piece.name.length,
     }));
