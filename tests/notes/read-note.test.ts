@@ -53,7 +53,8 @@ describe("roles and boundaries", () => {
   });
 
   it("passes over what is another compound: an oxime, an acetal, code", () => {
-    const text = "Benzaldehyde oxime (1 g) and acetone diethyl acetal (2 g); cyclohexanone sodium bisulfite adduct (3 g); `benzaldehyde (1 g)`.";
+    const text =
+      "Benzaldehyde oxime (1 g) and acetone diethyl acetal (2 g); cyclohexanone sodium bisulfite adduct (3 g); `benzaldehyde (1 g)`.";
     expect(read(text).mentions.filter((mention) => mention.carbonyl)).toEqual([]);
   });
 
