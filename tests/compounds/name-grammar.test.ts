@@ -1,5 +1,5 @@
 import { describe, expect, it } from "vitest";
-import { readName } from "../../shared-lib/compounds/name-grammar/parse.ts";
+import { readName } from "../../shared-lib/compounds/name-grammar/read-name.ts";
 import { createStructureToolkit } from "../../shared-lib/compounds/structure.ts";
 import carbonyls from "../../shared-lib/generated/compounds.json" with { type: "json" };
 

@@ -1,7 +1,7 @@
 /** Where in a text a name that the grammar may read begins and ends. Cheap tests first: most words are no names. */
 
 import { isLetter, isWordCharacter, plainText } from "../normal-form.ts";
-import { LONGEST_NAME, readName } from "./parse.ts";
+import { LONGEST_NAME, readName } from "./read-name.ts";
 
 /** How the name of an aldehyde or ketone ends, and how one of its esters, acids, salts and hydrates does. */
 const CARBONYL_END = /(?:aldehyde|[dnthpxym]al|one|phenone|furfural|piperonal|vanillin|benzil|benzoin|isatin)s?$/;
